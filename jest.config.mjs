@@ -1,0 +1,26 @@
+const moduleNameMapper = { '^@shared/(.*)$': '<rootDir>/shared/$1', '^@api/(.*)$': '<rootDir>/api/$1', '^@seeds/(.*)$': '<rootDir>/seeds/$1' };
+
+/** Two projects: what runs in Node, and Angular in jsdom. */
+export default {
+  projects: [
+    {
+      displayName: 'server',
+      testEnvironment: 'node',
+      testMatch: ['<rootDir>/{shared,api,seeds}/**/*.spec.ts', '<rootDir>/test/{api,outside,house}/**/*.spec.ts'],
+      transform: {
+        '^.+\\.[mc]?[tj]s$': ['@swc/jest', { jsc: { parser: { syntax: 'typescript' }, target: 'es2022' }, module: { type: 'commonjs' } }],
+      },
+      moduleNameMapper,
+    },
+    {
+      displayName: 'angular',
+      preset: 'jest-preset-angular',
+      testEnvironment: 'jest-preset-angular/environments/jest-jsdom-env',
+      setupFilesAfterEnv: ['<rootDir>/test/setup-angular.ts'],
+      testMatch: ['<rootDir>/src/**/*.spec.ts'],
+      transformIgnorePatterns: ['node_modules/(?!.*\\.mjs$)'],
+      transform: { '^.+\\.(ts|mjs|js|html)$': ['jest-preset-angular', { tsconfig: '<rootDir>/tsconfig.json', stringifyContentPathRegex: '\\.html$' }] },
+      moduleNameMapper,
+    },
+  ],
+};
