@@ -80,7 +80,16 @@ export const capabilities = z.object({
     maxOverall: lengthMm,
   }),
   glass: z.array(z.object({ glass: id, maxLong: lengthMm, maxShort: lengthMm })),
-  treatments: z.array(z.object({ treatment: id, minNominalMm: z.number(), maxNominalMm: z.number(), minEdge: lengthMm, maxLong: lengthMm, maxShort: lengthMm })),
+  treatments: z.array(
+    z.object({
+      treatment: id,
+      minNominalMm: z.number(),
+      maxNominalMm: z.number(),
+      minEdge: lengthMm,
+      maxLong: lengthMm,
+      maxShort: lengthMm,
+    }),
+  ),
   coatings: z.array(z.object({ coating: id, maxPerUnit: z.int() })),
   spacers: z.array(z.object({ spacer: id, widths: z.array(lengthMm) })),
   gases: z.array(z.object({ gas: id, minCavity: lengthMm, maxCavity: lengthMm })),

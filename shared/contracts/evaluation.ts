@@ -45,7 +45,12 @@ export const safetySchema = z.object({
   caution: z.string(),
 });
 
-export const buildabilitySchema = z.object({ fabricator: named, canBuild: z.boolean(), reasons: z.array(reasonSchema), advice: z.array(z.string()) });
+export const buildabilitySchema = z.object({
+  fabricator: named,
+  canBuild: z.boolean(),
+  reasons: z.array(reasonSchema),
+  advice: z.array(z.string()),
+});
 
 export const evaluationSchema = z
   .object({
@@ -74,7 +79,10 @@ export const evaluationSchema = z
     }),
     load: z.object({
       ...applies,
-      climate: z.object({ summer: z.number(), winter: z.number() }).nullable().meta({ description: 'isochoric pressure of one cavity, kPa' }),
+      climate: z
+        .object({ summer: z.number(), winter: z.number() })
+        .nullable()
+        .meta({ description: 'isochoric pressure of one cavity, kPa' }),
       insulatingUnitFactor: maybe,
       stress: z.array(z.object({ lite: z.int(), stressMpa: z.number(), allowableMpa: z.number(), deflectionMm: z.number() })),
       warnings: z.array(z.string()),

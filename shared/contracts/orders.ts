@@ -117,7 +117,15 @@ export const listOrders = endpoint({
   answer: pageOf(orderItem),
 });
 
-export const readOrder = endpoint({ id: 'orders.read', method: 'GET', path: '/api/orders/:id', summary: 'One order', params: z.object({ id }), status: 200, answer: orderSchema });
+export const readOrder = endpoint({
+  id: 'orders.read',
+  method: 'GET',
+  path: '/api/orders/:id',
+  summary: 'One order',
+  params: z.object({ id }),
+  status: 200,
+  answer: orderSchema,
+});
 
 export const moveOrder = endpoint({
   id: 'orders.move',
@@ -136,7 +144,12 @@ export const dispatchOrder = endpoint({
   path: '/api/orders/:id/dispatches',
   summary: 'Dispatch all or a part by line quantity; makes the invoice and posts it',
   params: z.object({ id }),
-  body: z.strictObject({ lines: z.array(z.strictObject({ line: id, quantity: z.int().min(1).max(10_000) })).min(1).max(500) }),
+  body: z.strictObject({
+    lines: z
+      .array(z.strictObject({ line: id, quantity: z.int().min(1).max(10_000) }))
+      .min(1)
+      .max(500),
+  }),
   status: 201,
   answer: orderSchema,
   idempotent: true,

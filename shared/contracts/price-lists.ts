@@ -9,7 +9,19 @@ import { shapeClasses } from './units';
  */
 
 /** The families of charges on a unit, in the order of the charge sheet. */
-export const unitFamilies = ['glass', 'treatment', 'coating', 'assembly', 'spacer', 'gas', 'grid', 'edge work', 'extras', 'shape', 'size'] as const;
+export const unitFamilies = [
+  'glass',
+  'treatment',
+  'coating',
+  'assembly',
+  'spacer',
+  'gas',
+  'grid',
+  'edge work',
+  'extras',
+  'shape',
+  'size',
+] as const;
 export const unitFamily = z.enum(unitFamilies);
 export type UnitFamily = z.infer<typeof unitFamily>;
 
@@ -54,7 +66,15 @@ export const priceListContent = z
     edgeWork: z.array(z.strictObject({ edgeWork: id, rate })),
     shapes: z.array(z.strictObject({ shape: z.enum(shapeClasses), ...charge })),
     /** `capillary`: per open tube; `always`: on every unit or line; `asked`: when the line names it. */
-    extras: z.array(z.strictObject({ id, name: line(80), applies: z.enum(['capillary', 'always', 'asked']), per: z.enum(['cavity', 'unit', 'line']), rate })),
+    extras: z.array(
+      z.strictObject({
+        id,
+        name: line(80),
+        applies: z.enum(['capillary', 'always', 'asked']),
+        per: z.enum(['cavity', 'unit', 'line']),
+        rate,
+      }),
+    ),
     standardSizes: z.array(z.strictObject({ width: measure, height: measure })),
     sizeCharges: z.strictObject({ nonStandard: z.strictObject(charge).nullable(), bands: z.array(sizeBand) }),
     tiers: z.array(z.strictObject({ tier: line(40), percents: familyPercents })),
@@ -70,7 +90,9 @@ export const priceListContent = z
       /** Percent of goods by lead-time class; a class without a row costs nothing. */
       rush: z.array(z.strictObject({ leadTimeClass: id, percent })),
     }),
-    tax: z.array(z.strictObject({ jurisdiction: line(40), label: line(80), rate: percent, on: z.array(z.enum(['goods', ...orderFamilies])) })),
+    tax: z.array(
+      z.strictObject({ jurisdiction: line(40), label: line(80), rate: percent, on: z.array(z.enum(['goods', ...orderFamilies])) }),
+    ),
   })
   .meta({ id: 'PriceListContent' });
 export type PriceListContent = z.infer<typeof priceListContent>;
@@ -124,4 +146,10 @@ export interface Destination {
 }
 
 export const versionState = z.enum(['draft', 'scheduled', 'in force', 'past']);
-export const priceListItem = z.object({ version: id, list: z.object({ id, name: z.string() }), number: z.int(), state: versionState, effectiveFrom: instant.nullable() });
+export const priceListItem = z.object({
+  version: id,
+  list: z.object({ id, name: z.string() }),
+  number: z.int(),
+  state: versionState,
+  effectiveFrom: instant.nullable(),
+});

@@ -3,7 +3,12 @@ import { currencies } from '../money/currencies';
 
 /** Field shapes that several contracts share. */
 
-export const id = z.string().min(1).max(64).regex(/^[\w.~-]+$/, 'letters, digits, dot, hyphen and underscore').meta({ description: 'identity' });
+export const id = z
+  .string()
+  .min(1)
+  .max(64)
+  .regex(/^[\w.~-]+$/, 'letters, digits, dot, hyphen and underscore')
+  .meta({ description: 'identity' });
 
 /** A length in millimetres as a decimal string, above 0 and up to 100 m. */
 export const lengthMm = z
@@ -45,8 +50,19 @@ export const day = z.iso.date();
 /** An instant in UTC, `…Z`. */
 export const instant = z.iso.datetime();
 
-export const line = (max: number) => z.string().trim().min(1).max(max).regex(/^[^\p{Cc}]*$/u, 'must not hold control characters');
-export const text = (max: number) => z.string().trim().max(max).regex(/^[^\p{Cc}]*$|^[\P{Cc}\n\r\t]*$/u, 'must not hold control characters');
+export const line = (max: number) =>
+  z
+    .string()
+    .trim()
+    .min(1)
+    .max(max)
+    .regex(/^[^\p{Cc}]*$/u, 'must not hold control characters');
+export const text = (max: number) =>
+  z
+    .string()
+    .trim()
+    .max(max)
+    .regex(/^[^\p{Cc}]*$|^[\P{Cc}\n\r\t]*$/u, 'must not hold control characters');
 
 export const named = z.object({ id, name: z.string() });
 

@@ -59,7 +59,9 @@ export const quoteSchema = z
     lines: z.array(quoteLine),
     ...totalsSchema.shape,
     retailGoods: moneySchema,
-    mails: z.array(z.object({ at: instant, to: z.string(), prices: z.enum(['wholesale', 'retail']), state: z.enum(['waiting', 'sent', 'failed']) })),
+    mails: z.array(
+      z.object({ at: instant, to: z.string(), prices: z.enum(['wholesale', 'retail']), state: z.enum(['waiting', 'sent', 'failed']) }),
+    ),
   })
   .meta({ id: 'Quote' });
 export type Quote = z.infer<typeof quoteSchema>;
@@ -96,7 +98,15 @@ export const listQuotes = endpoint({
   answer: pageOf(quoteItem),
 });
 
-export const readQuote = endpoint({ id: 'quotes.read', method: 'GET', path: '/api/quotes/:id', summary: 'One quote', params: quoteId, status: 200, answer: quoteSchema });
+export const readQuote = endpoint({
+  id: 'quotes.read',
+  method: 'GET',
+  path: '/api/quotes/:id',
+  summary: 'One quote',
+  params: quoteId,
+  status: 200,
+  answer: quoteSchema,
+});
 
 export const changeQuote = endpoint({
   id: 'quotes.change',
@@ -135,7 +145,11 @@ export const changeQuoteLines = endpoint({
   params: quoteId,
   body: z.strictObject({
     revision: z.int(),
-    lines: z.array(z.strictObject({ id: id.optional(), unit: unitSchema, quantity, tag: line(80).optional(), extras: z.array(id).max(20).optional() })).max(500),
+    lines: z
+      .array(
+        z.strictObject({ id: id.optional(), unit: unitSchema, quantity, tag: line(80).optional(), extras: z.array(id).max(20).optional() }),
+      )
+      .max(500),
   }),
   status: 200,
   answer: quoteSchema,
@@ -187,7 +201,12 @@ export const mailQuote = endpoint({
   path: '/api/quotes/:id/mail',
   summary: 'Mail the PDF to the dealer’s customer',
   params: quoteId,
-  body: z.strictObject({ to: z.email('an e-mail address').max(254), subject: line(200), message: text(4000), prices: z.enum(['wholesale', 'retail']).default('retail') }),
+  body: z.strictObject({
+    to: z.email('an e-mail address').max(254),
+    subject: line(200),
+    message: text(4000),
+    prices: z.enum(['wholesale', 'retail']).default('retail'),
+  }),
   status: 200,
   answer: quoteSchema,
   idempotent: true,

@@ -51,7 +51,14 @@ export const invoiceSchema = z
     dispatch: z.object({ id, number: z.string() }),
     discount: z.object({ percent, until: day, amount: moneySchema }).nullable().meta({ description: 'early-payment discount' }),
     lines: z.array(
-      z.object({ position: z.int(), tag: z.string().nullable(), description: z.string(), quantity: z.int(), unitPrice: moneySchema, linePrice: moneySchema }),
+      z.object({
+        position: z.int(),
+        tag: z.string().nullable(),
+        description: z.string(),
+        quantity: z.int(),
+        unitPrice: moneySchema,
+        linePrice: moneySchema,
+      }),
     ),
     goods: moneySchema,
     orderCharges: z.array(orderCharge),
@@ -72,11 +79,30 @@ export const listInvoices = endpoint({
   answer: pageOf(invoiceItem),
 });
 
-export const readInvoice = endpoint({ id: 'invoices.read', method: 'GET', path: '/api/invoices/:id', summary: 'One invoice', params: z.object({ id }), status: 200, answer: invoiceSchema });
+export const readInvoice = endpoint({
+  id: 'invoices.read',
+  method: 'GET',
+  path: '/api/invoices/:id',
+  summary: 'One invoice',
+  params: z.object({ id }),
+  status: 200,
+  answer: invoiceSchema,
+});
 
-export const invoicePdf = endpoint({ id: 'invoices.pdf', method: 'GET', path: '/api/invoices/:id/pdf', summary: 'The invoice as PDF', params: z.object({ id }), status: 200, file: 'application/pdf' });
+export const invoicePdf = endpoint({
+  id: 'invoices.pdf',
+  method: 'GET',
+  path: '/api/invoices/:id/pdf',
+  summary: 'The invoice as PDF',
+  params: z.object({ id }),
+  status: 200,
+  file: 'application/pdf',
+});
 
-const amount = z.string().regex(/^\d{1,12}(\.\d{1,3})?$/, 'an amount such as 1105.38').refine((value) => /[1-9]/.test(value), 'must be above zero');
+const amount = z
+  .string()
+  .regex(/^\d{1,12}(\.\d{1,3})?$/, 'an amount such as 1105.38')
+  .refine((value) => /[1-9]/.test(value), 'must be above zero');
 
 /** A share of a receipt for one invoice; `discount` is the early-payment discount taken with it. */
 export const allocationInput = z.strictObject({ invoice: id, amount, discount: amount.optional() });
@@ -127,7 +153,15 @@ export const listReceipts = endpoint({
   answer: pageOf(receiptSchema.omit({ allocations: true, entries: true })),
 });
 
-export const readReceipt = endpoint({ id: 'receipts.read', method: 'GET', path: '/api/receipts/:id', summary: 'One receipt', params: z.object({ id }), status: 200, answer: receiptSchema });
+export const readReceipt = endpoint({
+  id: 'receipts.read',
+  method: 'GET',
+  path: '/api/receipts/:id',
+  summary: 'One receipt',
+  params: z.object({ id }),
+  status: 200,
+  answer: receiptSchema,
+});
 
 export const applyReceipt = endpoint({
   id: 'receipts.apply',

@@ -8,7 +8,8 @@ export const roles = ['buyer', 'dealer-admin', 'sales', 'accounts', 'plant', 'fa
 export const role = z.enum(roles);
 export type Role = z.infer<typeof role>;
 
-export const companyKind = z.enum(['dealer', 'fabricator', 'market']);
+export const companyKinds = ['dealer', 'fabricator', 'market'] as const;
+export const companyKind = z.enum(companyKinds);
 export type CompanyKind = z.infer<typeof companyKind>;
 
 /** Which roles a company of a kind can give. */

@@ -94,7 +94,10 @@ export const changeCredit = endpoint({
   summary: 'Change limit, hold or way of counting, with a reason',
   params: z.object({ id }),
   body: z.strictObject({
-    limit: z.string().regex(/^\d{1,12}(\.\d{1,3})?$/).optional(),
+    limit: z
+      .string()
+      .regex(/^\d{1,12}(\.\d{1,3})?$/)
+      .optional(),
     onHold: z.boolean().optional(),
     countsFrom: z.enum(['placement', 'dispatch']).optional(),
     reason: line(300),
@@ -115,7 +118,10 @@ export const addressSchema = z
     jurisdiction: z.string().meta({ description: 'tax jurisdiction' }),
     zone: z.string().meta({ description: 'delivery zone' }),
     altitude: z.number().nullable().meta({ description: 'm above sea level' }),
-    exempt: z.object({ certificate: z.string(), until: day }).nullable().meta({ description: 'exemption certificate in force for the jurisdiction' }),
+    exempt: z
+      .object({ certificate: z.string(), until: day })
+      .nullable()
+      .meta({ description: 'exemption certificate in force for the jurisdiction' }),
   })
   .meta({ id: 'Address' });
 export type Address = z.infer<typeof addressSchema>;
@@ -138,6 +144,14 @@ export const listCompanies = endpoint({
   query: pageQuery,
   status: 200,
   answer: pageOf(
-    z.object({ id, name: z.string(), kind: z.enum(['dealer', 'fabricator', 'market']), town: z.string(), people: z.int(), tradeAccounts: z.int(), since: instant }),
+    z.object({
+      id,
+      name: z.string(),
+      kind: z.enum(['dealer', 'fabricator', 'market']),
+      town: z.string(),
+      people: z.int(),
+      tradeAccounts: z.int(),
+      since: instant,
+    }),
   ),
 });

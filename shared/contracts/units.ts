@@ -6,7 +6,18 @@ import { id, lengthMm } from './primitives';
  * millimetres; width before height, seen from outside; lites and cavities from outside in.
  */
 
-export const shapeClasses = ['rectangle', 'raked-head', 'gable', 'segment-arch', 'half-round', 'circle', 'ellipse', 'triangle', 'octagon', 'polygon'] as const;
+export const shapeClasses = [
+  'rectangle',
+  'raked-head',
+  'gable',
+  'segment-arch',
+  'half-round',
+  'circle',
+  'ellipse',
+  'triangle',
+  'octagon',
+  'polygon',
+] as const;
 
 export const shape = z.discriminatedUnion('class', [
   z.strictObject({ class: z.literal('rectangle') }),
@@ -26,7 +37,10 @@ export const shape = z.discriminatedUnion('class', [
   /** Corners in order, from the lower left of the bounding rectangle, y upward. */
   z.strictObject({
     class: z.literal('polygon'),
-    points: z.array(z.strictObject({ x: z.string().regex(/^\d{1,6}(\.\d{1,8})?$/), y: z.string().regex(/^\d{1,6}(\.\d{1,8})?$/) })).min(3).max(24),
+    points: z
+      .array(z.strictObject({ x: z.string().regex(/^\d{1,6}(\.\d{1,8})?$/), y: z.string().regex(/^\d{1,6}(\.\d{1,8})?$/) }))
+      .min(3)
+      .max(24),
   }),
 ]);
 export type Shape = z.infer<typeof shape>;

@@ -1,7 +1,7 @@
 import { sql } from 'drizzle-orm';
 import { index, primaryKey, real, sqliteTable, text, uniqueIndex, integer } from 'drizzle-orm/sqlite-core';
 import { type Terms } from '@shared/contracts/trade-accounts';
-import { companyKind, type Role, roles } from '@shared/contracts/session';
+import { companyKinds, type Role, roles } from '@shared/contracts/session';
 import { type Currency } from '@shared/money/currencies';
 import { type Capabilities } from '@shared/contracts/catalogue';
 import { day, flag, id, instant, isCurrency, isDay, json, minor, notNegative, oneOf } from './columns';
@@ -27,7 +27,7 @@ export const companies = sqliteTable(
   'companies',
   {
     id: id(),
-    kind: text('kind', { enum: companyKind.options }).notNull(),
+    kind: text('kind', { enum: companyKinds }).notNull(),
     name: text('name').notNull(),
     town: text('town').notNull(),
     country: text('country').notNull(),
@@ -39,7 +39,7 @@ export const companies = sqliteTable(
     createdAt: instant('created_at').notNull(),
   },
   (t) => [
-    oneOf('companies_kind', t.kind, companyKind.options),
+    oneOf('companies_kind', t.kind, companyKinds),
     oneOf('companies_measure_system', t.measureSystem, ['imperial', 'metric']),
     index('companies_by_name').on(t.name, t.id),
     uniqueIndex('companies_by_domain').on(t.emailDomain),

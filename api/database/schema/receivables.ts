@@ -140,9 +140,15 @@ export const invoices = sqliteTable(
     uniqueIndex('invoices_by_dispatch').on(t.dispatchId),
     index('invoices_of_fabricator').on(t.fabricatorId, t.dueOn, t.id),
     index('invoices_of_dealer').on(t.dealerId, t.dueOn, t.id),
-    index('invoices_open_of_fabricator').on(t.fabricatorId, t.dueOn, t.id).where(sql`open_minor > 0`),
-    index('invoices_open_of_dealer').on(t.dealerId, t.dueOn, t.id).where(sql`open_minor > 0`),
-    index('invoices_open_of_account').on(t.tradeAccountId, t.dueOn).where(sql`open_minor > 0`),
+    index('invoices_open_of_fabricator')
+      .on(t.fabricatorId, t.dueOn, t.id)
+      .where(sql`open_minor > 0`),
+    index('invoices_open_of_dealer')
+      .on(t.dealerId, t.dueOn, t.id)
+      .where(sql`open_minor > 0`),
+    index('invoices_open_of_account')
+      .on(t.tradeAccountId, t.dueOn)
+      .where(sql`open_minor > 0`),
     index('invoices_of_order').on(t.orderId),
   ],
 );
