@@ -7,6 +7,7 @@ import { companyStore } from './companies/company-store';
 import { peopleStore } from './companies/people-store';
 import { type Config } from './config';
 import { type Database, type Db, openDatabase } from './database/open-database';
+import { outboxStore } from './mail/outbox-store';
 
 /** Milliseconds since 1970, UTC. */
 export type Clock = () => number;
@@ -17,6 +18,7 @@ export function createStores(db: Db) {
     people: peopleStore(db),
     companies: companyStore(db),
     catalogue: catalogueStore(db),
+    outbox: outboxStore(db),
   };
 }
 export type Stores = ReturnType<typeof createStores>;
