@@ -1,29 +1,5 @@
-import { type MailAttachment } from '../database/schema/mail';
 import { type Dependencies } from '../dependencies';
-
-/** What a use case says about a mail. */
-export interface MailContent {
-  /** the company in whose name it goes out */
-  companyId: string;
-  fromName: string;
-  replyTo: string;
-  /** one address */
-  to: string;
-  subject: string;
-  /** plain text */
-  body: string;
-  attachments: MailAttachment[];
-  /** what it is about, e.g. `quote` and its id */
-  subjectKind: string;
-  subjectId: string;
-}
-
-export interface NewMail extends MailContent {
-  id: string;
-  messageId: string;
-  /** UTC epoch milliseconds */
-  createdAt: number;
-}
+import { type MailContent, type NewMail } from './outbox-store';
 
 const oneLine = (text: string) => text.replace(/\p{Cc}+/gu, ' ').trim();
 

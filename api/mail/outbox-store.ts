@@ -1,7 +1,30 @@
 import { and, asc, desc, eq, lte } from 'drizzle-orm';
 import { type Db } from '../database/open-database';
-import { outboxMails } from '../database/schema/mail';
-import { type NewMail } from './new-mail';
+import { type MailAttachment, outboxMails } from '../database/schema/mail';
+
+/** What a use case says about a mail. */
+export interface MailContent {
+  /** the company in whose name it goes out */
+  companyId: string;
+  fromName: string;
+  replyTo: string;
+  /** one address */
+  to: string;
+  subject: string;
+  /** plain text */
+  body: string;
+  attachments: MailAttachment[];
+  /** what it is about, e.g. `quote` and its id */
+  subjectKind: string;
+  subjectId: string;
+}
+
+export interface NewMail extends MailContent {
+  id: string;
+  messageId: string;
+  /** UTC epoch milliseconds */
+  createdAt: number;
+}
 
 export type OutboxMail = typeof outboxMails.$inferSelect;
 
