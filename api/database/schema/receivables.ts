@@ -146,8 +146,11 @@ export const invoices = sqliteTable(
     index('invoices_open_of_dealer')
       .on(t.dealerId, t.dueOn, t.id)
       .where(sql`open_minor > 0`),
+    index('invoices_of_account').on(t.tradeAccountId, t.dueOn, t.id),
+    index('invoices_of_dealer_by_number').on(t.dealerId, t.number, t.id),
+    index('invoices_of_dealer_by_reference').on(t.dealerId, t.reference, t.id),
     index('invoices_open_of_account')
-      .on(t.tradeAccountId, t.dueOn)
+      .on(t.tradeAccountId, t.dueOn, t.id)
       .where(sql`open_minor > 0`),
     index('invoices_of_order').on(t.orderId),
   ],
@@ -183,6 +186,9 @@ export const receipts = sqliteTable(
     check('receipts_unapplied', sql`${t.unappliedMinor} between 0 and ${t.amountMinor}`),
     uniqueIndex('receipts_by_number').on(t.fabricatorId, t.number),
     index('receipts_newest').on(t.fabricatorId, t.recordedAt, t.id),
+    index('receipts_unapplied')
+      .on(t.fabricatorId, t.recordedAt, t.id)
+      .where(sql`unapplied_minor > 0`),
     index('receipts_of_account').on(t.tradeAccountId, t.recordedAt, t.id),
   ],
 );
