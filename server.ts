@@ -69,7 +69,7 @@ async function composeForDevelopment() {
 }
 export const reqHandler = createNodeRequestHandler(async (request, response, next) => {
   composed ??= composeForDevelopment();
-  (await composed).app(request, response, next);
+  (await composed).app(request as Parameters<Express>[0], response as Parameters<Express>[1], next);
 });
 
 /** Finishes the requests under way, then folds the write-ahead log into the file. */
