@@ -46,6 +46,8 @@ export const ledgerEntries = sqliteTable(
     fabricatorId: text('fabricator_id')
       .notNull()
       .references(() => companies.id),
+    /** the fabricator's entries in the order of posting, without gaps */
+    sequence: integer('sequence').notNull().default(0),
     on: day('on_day').notNull(),
     at: instant('at').notNull(),
     kind: text('kind').notNull(),
@@ -60,7 +62,8 @@ export const ledgerEntries = sqliteTable(
   (t) => [
     isDay('ledger_entries_day', t.on),
     index('ledger_entries_by_document').on(t.documentKind, t.documentId),
-    index('ledger_entries_by_account').on(t.tradeAccountId, t.at, t.id),
+    uniqueIndex('ledger_entries_by_sequence').on(t.fabricatorId, t.sequence),
+    index('ledger_entries_by_account').on(t.tradeAccountId, t.sequence),
     index('ledger_entries_by_day').on(t.fabricatorId, t.on),
     uniqueIndex('ledger_entries_reversed_once').on(t.reverses),
   ],
