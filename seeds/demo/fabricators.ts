@@ -91,7 +91,7 @@ export const northmere: DemoFabricator = {
     ],
     coatings: [
       { coating: 'low-e-soft', maxPerUnit: 2 },
-      { coating: 'solar-control-soft', maxPerUnit: 1 },
+      { coating: 'low-e-solar', maxPerUnit: 1 },
       { coating: 'low-e-hard', maxPerUnit: 1 },
     ],
     spacers: [
@@ -105,8 +105,8 @@ export const northmere: DemoFabricator = {
       { gas: 'krypton', minCavity: '6', maxCavity: '12' },
     ],
     grids: [
-      { bar: 'flat-bar-16', minCavity: '9' },
-      { bar: 'contour-bar-25', minCavity: '14' },
+      { bar: 'flat-16', minCavity: '9' },
+      { bar: 'profiled-19', minCavity: '14' },
     ],
     edgeWork: ['seamed', 'ground'],
     shapes: [...shapeClasses],
@@ -163,7 +163,7 @@ export const kestrelFord: DemoFabricator = {
     ],
     coatings: [
       { coating: 'low-e-soft', maxPerUnit: 2 },
-      { coating: 'solar-control-soft', maxPerUnit: 2 },
+      { coating: 'low-e-solar', maxPerUnit: 2 },
     ],
     spacers: [
       { spacer: 'aluminium', widths: spacerWidths },
@@ -174,7 +174,7 @@ export const kestrelFord: DemoFabricator = {
       { gas: 'air', minCavity: '6', maxCavity: '20' },
       { gas: 'argon', minCavity: '8', maxCavity: '20' },
     ],
-    grids: [{ bar: 'flat-bar-16', minCavity: '9' }],
+    grids: [{ bar: 'flat-16', minCavity: '9' }],
     edgeWork: ['seamed', 'ground', 'polished'],
     shapes: ['rectangle', 'raked-head', 'triangle', 'polygon'],
     capillary: { offered: true, adviseAboveM: 800 },
@@ -241,7 +241,7 @@ export const aldersund: DemoFabricator = {
     ],
     coatings: [
       { coating: 'low-e-soft', maxPerUnit: 2 },
-      { coating: 'solar-control-soft', maxPerUnit: 1 },
+      { coating: 'low-e-solar', maxPerUnit: 1 },
     ],
     spacers: [
       { spacer: 'stainless', widths: ['8', '10', '12', '14', '16', '18', '20'] },
@@ -252,7 +252,7 @@ export const aldersund: DemoFabricator = {
       { gas: 'argon', minCavity: '8', maxCavity: '20' },
       { gas: 'krypton', minCavity: '6', maxCavity: '14' },
     ],
-    grids: [{ bar: 'contour-bar-25', minCavity: '14' }],
+    grids: [{ bar: 'profiled-19', minCavity: '14' }],
     edgeWork: ['seamed', 'polished'],
     shapes: ['rectangle', 'raked-head', 'gable', 'segment-arch', 'half-round', 'circle', 'triangle'],
     capillary: { offered: false, adviseAboveM: 600 },
