@@ -21,5 +21,9 @@ export default tseslint.config(
   },
   { files: ['**/*.cli.ts', 'test/**/*.ts', 'server.ts'], rules: { 'no-console': 'off' } },
   { files: ['src/**/*.html'], extends: [...angular.configs.templateRecommended, ...angular.configs.templateAccessibility] },
-  { files: ['**/*.mjs'], extends: [js.configs.recommended], languageOptions: { globals: { process: 'readonly', console: 'readonly', URL: 'readonly', fetch: 'readonly', setTimeout: 'readonly' } } },
+  {
+    files: ['**/*.mjs'],
+    extends: [js.configs.recommended],
+    languageOptions: { globals: { process: 'readonly', console: 'readonly', URL: 'readonly', fetch: 'readonly', setTimeout: 'readonly' } },
+  },
 );

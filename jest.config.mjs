@@ -1,15 +1,29 @@
-const moduleNameMapper = { '^@shared/(.*)$': '<rootDir>/shared/$1', '^@api/(.*)$': '<rootDir>/api/$1', '^@seeds/(.*)$': '<rootDir>/seeds/$1' };
+const moduleNameMapper = {
+  '^@shared/(.*)$': '<rootDir>/shared/$1',
+  '^@api/(.*)$': '<rootDir>/api/$1',
+  '^@seeds/(.*)$': '<rootDir>/seeds/$1',
+};
 
-/** Two projects: what runs in Node, and Angular in jsdom. */
+const serverTransform = {
+  '^.+\\.[mc]?[tj]s$': ['@swc/jest', { jsc: { parser: { syntax: 'typescript' }, target: 'es2022' }, module: { type: 'commonjs' } }],
+};
+
+/** Three projects: what runs in Node, the built product in a browser, and Angular in jsdom. */
 export default {
   projects: [
     {
       displayName: 'server',
       testEnvironment: 'node',
       testMatch: ['<rootDir>/{shared,api,seeds}/**/*.spec.ts', '<rootDir>/test/{api,outside,house}/**/*.spec.ts'],
-      transform: {
-        '^.+\\.[mc]?[tj]s$': ['@swc/jest', { jsc: { parser: { syntax: 'typescript' }, target: 'es2022' }, module: { type: 'commonjs' } }],
-      },
+      transform: serverTransform,
+      moduleNameMapper,
+    },
+    {
+      // Against the built product; `npm test` builds it first.
+      displayName: 'browser',
+      testEnvironment: 'node',
+      testMatch: ['<rootDir>/test/browser/**/*.spec.ts'],
+      transform: serverTransform,
       moduleNameMapper,
     },
     {
@@ -19,7 +33,9 @@ export default {
       setupFilesAfterEnv: ['<rootDir>/test/setup-angular.ts'],
       testMatch: ['<rootDir>/src/**/*.spec.ts'],
       transformIgnorePatterns: ['node_modules/(?!.*\\.mjs$)'],
-      transform: { '^.+\\.(ts|mjs|js|html)$': ['jest-preset-angular', { tsconfig: '<rootDir>/tsconfig.json', stringifyContentPathRegex: '\\.html$' }] },
+      transform: {
+        '^.+\\.(ts|mjs|js|html)$': ['jest-preset-angular', { tsconfig: '<rootDir>/tsconfig.json', stringifyContentPathRegex: '\\.html$' }],
+      },
       moduleNameMapper,
     },
   ],
