@@ -6,6 +6,7 @@ import { type CurrentCatalogue, currentCatalogue } from './catalogue/current-cat
 import { companyStore } from './companies/company-store';
 import { peopleStore } from './companies/people-store';
 import { type Config } from './config';
+import { numberSeriesStore } from './database/number-series-store';
 import { type Database, type Db, openDatabase } from './database/open-database';
 import { outboxStore } from './mail/outbox-store';
 
@@ -19,6 +20,7 @@ export function createStores(db: Db) {
     companies: companyStore(db),
     catalogue: catalogueStore(db),
     outbox: outboxStore(db),
+    numbers: numberSeriesStore(db),
   };
 }
 export type Stores = ReturnType<typeof createStores>;
