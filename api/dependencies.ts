@@ -9,6 +9,8 @@ import { type Config } from './config';
 import { numberSeriesStore } from './database/number-series-store';
 import { type Database, type Db, openDatabase } from './database/open-database';
 import { outboxStore } from './mail/outbox-store';
+import { priceListStore } from './pricing/price-list-store';
+import { termsStore } from './pricing/terms-store';
 
 /** Milliseconds since 1970, UTC. */
 export type Clock = () => number;
@@ -21,6 +23,8 @@ export function createStores(db: Db) {
     catalogue: catalogueStore(db),
     outbox: outboxStore(db),
     numbers: numberSeriesStore(db),
+    priceLists: priceListStore(db),
+    terms: termsStore(db),
   };
 }
 export type Stores = ReturnType<typeof createStores>;
