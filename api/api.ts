@@ -5,6 +5,7 @@ import helmet from 'helmet';
 import { pinoHttp } from 'pino-http';
 import { readHealth, readOpenApi } from '@shared/contracts/system';
 import { readCatalogue } from '@shared/contracts/bench';
+import { catalogueRoutes } from './catalogue/catalogue-routes';
 import { companyRoutes } from './companies/company-routes';
 import { sessionRoutes } from './companies/session-routes';
 import { type Dependencies } from './dependencies';
@@ -20,6 +21,7 @@ export const routes: Route[] = [
   serveAnyone(readCatalogue, (_actor, _input, { catalogue }) => catalogue()),
   ...sessionRoutes,
   ...companyRoutes,
+  ...catalogueRoutes,
 ];
 
 /** The API as an Express application that does not listen. */
