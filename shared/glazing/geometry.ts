@@ -55,7 +55,8 @@ export function perimeterOf({ start, segments }: Outline): number {
 /**
  * Length of the line that runs `inset` mm inside the outline. Where the edge turns by an angle, the
  * inner line is shorter by 2·inset·tan(angle/2); along a curve by inset × the angle it turns. A
- * rectangle's is shorter by 8 insets, a circle's by 2π. Never below zero.
+ * rectangle's is shorter by 8 insets, a circle's by 2π. Exact but where a corner meets a curve, which
+ * the square of the inset ÷ the radius leaves out. Never below zero.
  */
 export function insetPerimeter(outline: Outline, inset: number): number {
   const { start, segments } = outline;
