@@ -9,8 +9,14 @@ import { type Config } from './config';
 import { numberSeriesStore } from './database/number-series-store';
 import { type Database, type Db, openDatabase } from './database/open-database';
 import { outboxStore } from './mail/outbox-store';
+import { idempotencyStore } from './orders/idempotency-store';
+import { orderListStore } from './orders/order-list-store';
+import { orderStore } from './orders/order-store';
 import { priceListStore } from './pricing/price-list-store';
 import { termsStore } from './pricing/terms-store';
+import { invoiceStore } from './receivables/invoice-store';
+import { ledgerStore } from './receivables/ledger-store';
+import { receiptStore } from './receivables/receipt-store';
 
 /** Milliseconds since 1970, UTC. */
 export type Clock = () => number;
@@ -25,6 +31,12 @@ export function createStores(db: Db) {
     numbers: numberSeriesStore(db),
     priceLists: priceListStore(db),
     terms: termsStore(db),
+    idempotency: idempotencyStore(db),
+    orders: orderStore(db),
+    orderLists: orderListStore(db),
+    invoices: invoiceStore(db),
+    receipts: receiptStore(db),
+    ledger: ledgerStore(db),
   };
 }
 export type Stores = ReturnType<typeof createStores>;
