@@ -3,7 +3,11 @@ import { toObservable, toSignal } from '@angular/core/rxjs-interop';
 import { catchError, combineLatest, map, type Observable, of, startWith, switchMap } from 'rxjs';
 import { ProblemError } from './problem-error';
 
-type State<T> = { is: 'loading' } | { is: 'here'; value: T } | { is: 'refused'; problem: ProblemError };
+type State<Request, T> =
+  | { is: 'loading' }
+  /** what was answered, and to which asking */
+  | { is: 'here'; value: T; request: Request; turn: number }
+  | { is: 'refused'; problem: ProblemError };
 
 /** Something read from the server, as signals. What was shown stays until its successor is here. */
 export interface Loaded<T> {
@@ -25,29 +29,32 @@ export function loaded<Request, T>(request: Signal<Request | undefined>, read: (
   const taken = signal<{ request: Request | undefined; turn: number; value: T } | null>(null);
   const state = toSignal(
     combineLatest([toObservable(request), toObservable(turn)]).pipe(
-      switchMap(([wanted]) =>
+      switchMap(([wanted, asked]) =>
         wanted === undefined
-          ? of<State<T>>({ is: 'loading' })
+          ? of<State<Request, T>>({ is: 'loading' })
           : read(wanted).pipe(
-              map((value): State<T> => ({ is: 'here', value })),
-              catchError((error: unknown) => of<State<T>>({ is: 'refused', problem: ProblemError.from(error) })),
-              startWith<State<T>>({ is: 'loading' }),
+              map((value): State<Request, T> => ({ is: 'here', value, request: wanted, turn: asked })),
+              catchError((error: unknown) => of<State<Request, T>>({ is: 'refused', problem: ProblemError.from(error) })),
+              startWith<State<Request, T>>({ is: 'loading' }),
             ),
       ),
     ),
-    { initialValue: { is: 'loading' } as State<T> },
+    { initialValue: { is: 'loading' } as State<Request, T> },
   );
   let last: { request: Request | undefined; value: T } | undefined;
   const value = computed(() => {
     const set = taken();
     const now = state();
-    if (set && set.request === request() && set.turn === turn()) return set.value;
-    if (now.is === 'here') {
-      last = { request: request(), value: now.value };
+    if (set && set.request === request() && set.turn === turn()) {
+      last = set;
+      return set.value;
+    }
+    if (now.is === 'here' && now.request === request() && now.turn === turn()) {
+      last = now;
       return now.value;
     }
     // While reading the same thing again, what was there stays on the screen.
-    return now.is === 'loading' && last && last.request === request() ? last.value : undefined;
+    return now.is !== 'refused' && last && last.request === request() ? last.value : undefined;
   });
   return {
     value,
