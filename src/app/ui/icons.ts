@@ -14,7 +14,7 @@ import deleteIcon from '@material-symbols/svg-400/rounded/delete.svg';
 import download from '@material-symbols/svg-400/rounded/download.svg';
 import edit from '@material-symbols/svg-400/rounded/edit.svg';
 import error from '@material-symbols/svg-400/rounded/error.svg';
-import expandMore from '@material-symbols/svg-400/rounded/expand_more.svg';
+import expandMore from '@material-symbols/svg-400/rounded/stat_minus_1.svg';
 import history from '@material-symbols/svg-400/rounded/history.svg';
 import hourglassTop from '@material-symbols/svg-400/rounded/hourglass_top.svg';
 import info from '@material-symbols/svg-400/rounded/info.svg';
