@@ -14,9 +14,9 @@ export interface SizeLimits {
 }
 
 /**
- * The nearest size that keeps every limit at once, or null where shrinking for one limit would
- * break a minimum. Edges are first brought inside their own limits, exactly; area, aspect and
- * weight then take from the long edge, in whole millimetres.
+ * The nearest size that keeps every limit at once, or null where none does with these edges. Each
+ * edge is first brought inside its own limits, exactly; aspect, area and weight then take from the
+ * longer edge alone, in whole millimetres.
  */
 export function nearestSize(width: string, height: string, limits: SizeLimits): { width: string; height: string } | null {
   const wide = exact(width).greaterThan(height);
@@ -26,20 +26,16 @@ export function nearestSize(width: string, height: string, limits: SizeLimits): 
   if (!w || !h) return null;
 
   const fits = (x: Exact, y: Exact) => fitsArea(x, y, limits) && (limits.lightEnough?.(x.toNumber(), y.toNumber()) ?? true);
-  // Aspect: the long edge comes in, unless the short one may not be left so short.
-  const longest = (short: Exact) => short.times(limits.maxAspect).floor();
-  if (w.greaterThan(h) && w.greaterThan(longest(h).plus(1))) w = longest(h);
-  else if (h.greaterThan(w) && h.greaterThan(longest(w).plus(1))) h = longest(w);
-
-  if (!fits(w, h)) {
-    const takesFromWidth = w.greaterThanOrEqualTo(h);
-    const [long, short] = takesFromWidth ? [w, h] : [h, w];
-    const square = !fitsOriented(short, short, takesFromWidth, fits);
-    const edge = largestFitting(square ? short : long, (value) => fitsOriented(value, square ? value : short, takesFromWidth, fits));
-    if (!edge) return null;
-    [w, h] = square ? [edge, edge] : takesFromWidth ? [edge, short] : [short, edge];
+  const slender = (long: Exact, short: Exact) => long.greaterThan(short.times(limits.maxAspect));
+  if (w.greaterThan(h)) {
+    const short = h;
+    w = largestFitting(w, (long) => !slender(long, short) && fits(long, short));
+  } else {
+    const short = w;
+    h = largestFitting(h, (long) => !slender(long, short) && fits(short, long));
   }
-  if (w.lessThan(low.width) || h.lessThan(low.height)) return null;
+  // An edge that had to come in far may now be the short one.
+  if (!w || !h || w.lessThan(low.width) || h.lessThan(low.height) || slender(Exact.max(w, h), Exact.min(w, h))) return null;
   return { width: w.toFixed(), height: h.toFixed() };
 }
 
@@ -47,12 +43,9 @@ function fitsArea(w: Exact, h: Exact, { maxAreaM2 }: SizeLimits): boolean {
   return w.times(h).lessThanOrEqualTo(new Exact(String(maxAreaM2)).times(1e6));
 }
 
-function fitsOriented(long: Exact, short: Exact, takesFromWidth: boolean, fits: (x: Exact, y: Exact) => boolean): boolean {
-  return takesFromWidth ? fits(long, short) : fits(short, long);
-}
-
-/** The largest whole millimetre up to `from` that fits, by halving; null when none does. */
+/** `from` itself or the largest whole millimetre below it that fits, by halving; null when none does. */
 function largestFitting(from: Exact, fits: (value: Exact) => boolean): Exact | null {
+  if (fits(from)) return from;
   let low = 0;
   let high = from.floor().toNumber() + 1;
   while (high - low > 1) {

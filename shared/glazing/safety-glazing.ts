@@ -9,6 +9,8 @@ type Answer = boolean | undefined;
 
 const inch = 0.0254;
 const nineSquareFeet = 9 * (12 * inch) ** 2;
+/** Limits are decimal and numbers binary: what is equal on paper counts as equal. */
+const nothing = 1e-9;
 const caution =
   'The code has exceptions that this does not check, and railings and guards (R308.4.4) are not asked about. The local code decides; ask a licensed professional.';
 
@@ -67,8 +69,8 @@ function rulesFor({ place, heightMm }: ResolvedUnit, area: number): Rule[] {
   // One edge and the height give the other; on a slope the true top is lower, so this errs to the safe side.
   const bottom = place.bottomEdge ?? (place.topEdge === undefined ? undefined : place.topEdge - height);
   const top = place.topEdge ?? (place.bottomEdge === undefined ? undefined : place.bottomEdge + height);
-  const bottomUnder = (inches: number) => edge('bottom', bottom, inches, (value, limit) => value < limit, 'under');
-  const large = area > nineSquareFeet;
+  const bottomUnder = (inches: number) => edge('bottom', bottom, inches, (value, limit) => value < limit - nothing, 'under');
+  const large = area > nineSquareFeet + nothing;
 
   return [
     {
@@ -99,9 +101,9 @@ function rulesFor({ place, heightMm }: ResolvedUnit, area: number): Rule[] {
           unmet: `${area.toFixed(2)} m² is not over 9 ft² (0.84 m²).`,
         },
         bottomUnder(18),
-        edge('top', top, 36, (value, limit) => value > limit, 'over'),
+        edge('top', top, 36, (value, limit) => value > limit + nothing, 'over'),
         {
-          answer: place.walkingSurface === undefined ? undefined : place.walkingSurface <= 36 * inch + 1e-9,
+          answer: place.walkingSurface === undefined ? undefined : place.walkingSurface <= 36 * inch + nothing,
           met: 'a walking surface within 36 in (914 mm)',
           asks: 'how far the nearest walking surface is',
           unmet: 'No walking surface is within 36 in (914 mm).',
