@@ -14,6 +14,7 @@ import { orderListStore } from './orders/order-list-store';
 import { orderStore } from './orders/order-store';
 import { priceListStore } from './pricing/price-list-store';
 import { termsStore } from './pricing/terms-store';
+import { quoteStore } from './quotes/quote-store';
 import { invoiceStore } from './receivables/invoice-store';
 import { ledgerStore } from './receivables/ledger-store';
 import { receiptStore } from './receivables/receipt-store';
@@ -31,6 +32,7 @@ export function createStores(db: Db) {
     numbers: numberSeriesStore(db),
     priceLists: priceListStore(db),
     terms: termsStore(db),
+    quotes: quoteStore(db),
     idempotency: idempotencyStore(db),
     orders: orderStore(db),
     orderLists: orderListStore(db),
