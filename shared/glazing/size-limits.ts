@@ -72,11 +72,17 @@ export function sizeReasons(unit: ResolvedUnit, geometry: Evaluation['geometry']
     lightEnough: unit.unit.shape.class === 'rectangle' ? (w, h) => weightAt(unit, w, h) <= limits.maxWeightKg + 1e-9 : null,
   };
   const nearest = nearestSize(width, height, all);
-  return found.map(({ axis, ...reason }) => {
-    // Where another limit moves this edge, the value that passes is that of both.
-    const moved = nearest && nearest[axis] === unit.unit[axis] ? other(axis) : axis;
-    const value = nearest && nearest[moved] !== unit.unit[moved] ? nearest[moved] : null;
-    return { ...reason, nearest: value === null ? null : `${value} mm`, nearestValue: value, pointer: `/${value === null ? axis : moved}` };
+  const changes = (axis: Axis) => nearest !== null && nearest[axis] !== unit.unit[axis];
+  // A limit counted along one edge may be kept by the other.
+  const placed = found.map((reason) => ({
+    ...reason,
+    axis: changes(reason.axis) || !changes(other(reason.axis)) ? reason.axis : other(reason.axis),
+  }));
+  // Where an edge without a reason of its own would have to follow, no one field mends it.
+  const complete = (['width', 'height'] as const).every((axis) => !changes(axis) || placed.some((reason) => reason.axis === axis));
+  return placed.map(({ axis, ...reason }) => {
+    const value = complete && nearest && changes(axis) ? nearest[axis] : null;
+    return { ...reason, nearest: value === null ? null : `${value} mm`, nearestValue: value, pointer: `/${axis}` };
   });
 }
 
