@@ -152,7 +152,7 @@ export function loadCompanies(db: Db, passwordHash: string, at: number): void {
           terms: maker.terms,
           limitMinor: minorOf(String(account.limit), maker.currency),
           countsFrom: account.countsFrom ?? 'placement',
-          onHold: account.onHold ?? false,
+          onHold: false,
           graceDays: 15,
           createdAt: at,
         })
