@@ -1,0 +1,79 @@
+import { addCharge, areaAmount, refuse, type UnitInHand } from './unit-in-hand';
+import { type Rule } from './compile-list';
+
+/** The charges by area: glass, treatment, coating, assembly and gas. Percentages are taken on them. */
+
+/** One row a lite. */
+export function chargeGlass(hand: UnitInHand): void {
+  const { unit, list } = hand;
+  for (const [i, { glass }] of unit.lites.entries()) {
+    const rule = list.glass.get(glass);
+    if (rule) addAreaCharge(hand, rule, i + 1);
+    else refuse(hand, list.products.nameOf('glasses', glass), `/lites/${i}/glass`);
+  }
+}
+
+/** One row a treated lite, by treatment and nominal thickness. Glass left annealed costs nothing unless the list says so. */
+export function chargeTreatment(hand: UnitInHand): void {
+  const { unit, list } = hand;
+  for (const [i, { glass, treatment }] of unit.lites.entries()) {
+    const item = list.products.glasses.get(glass);
+    const rule = item && list.treatments.get(treatment)?.get(item.nominalMm);
+    if (rule) addAreaCharge(hand, rule, i + 1);
+    else if (item && list.products.treatments.get(treatment)?.kind !== 'annealed') {
+      refuse(hand, `${list.products.nameOf('treatments', treatment)} ${item.name}`, `/lites/${i}/treatment`);
+    }
+  }
+}
+
+/** One row a coated surface. */
+export function chargeCoating(hand: UnitInHand): void {
+  const { unit, list } = hand;
+  for (const [i, { coating }] of unit.lites.entries()) {
+    if (!coating) continue;
+    const rule = list.coatings.get(coating.id);
+    if (rule) addAreaCharge(hand, rule, coating.surface);
+    else refuse(hand, list.products.nameOf('coatings', coating.id), `/lites/${i}/coating/id`);
+  }
+}
+
+/** One row a cavity, at the rate of its number from outside. */
+export function chargeAssembly(hand: UnitInHand): void {
+  const { unit, list } = hand;
+  const only = unit.cavities.length === 1;
+  for (let number = 1; number <= unit.cavities.length; number += 1) {
+    const rule = list.assembly.get(number);
+    if (rule) addAreaCharge(hand, rule, only ? 0 : number);
+    else refuse(hand, `cavity ${number}`, `/cavities/${number - 1}`);
+  }
+}
+
+/** One row a cavity, not below the list's minimum for one cavity. */
+export function chargeGas(hand: UnitInHand): void {
+  const { unit, list, sheet } = hand;
+  const only = unit.cavities.length === 1;
+  for (const [i, { gas }] of unit.cavities.entries()) {
+    const rule = list.gases.get(gas);
+    if (!rule) {
+      refuse(hand, list.products.nameOf('gases', gas), `/cavities/${i}/gas`);
+      continue;
+    }
+    if (rule.free) continue;
+    const amount = areaAmount(hand, rule);
+    const label = rule.labels[only ? 0 : i + 1] ?? '';
+    if (rule.minimum && amount.listMinor === rule.minimum.minor) {
+      addCharge(hand, { ...rule, rate: rule.minimum.rate }, `${label}, minimum`, amount, '1', 'cavity');
+    } else {
+      addCharge(hand, rule, label, amount, hand.size.areaText, list.measures.areaUnit);
+    }
+    sheet.areaMinor += amount.listMinor;
+  }
+}
+
+/** `place`: number of the lite, surface or cavity; 0 where there is but one. */
+function addAreaCharge(hand: UnitInHand, rule: Rule, place: number): void {
+  if (rule.free) return;
+  const amount = areaAmount(hand, rule);
+  addCharge(hand, rule, rule.labels[place] ?? '', amount, hand.size.areaText, hand.list.measures.areaUnit);
+  hand.sheet.areaMinor += amount.listMinor;
+}

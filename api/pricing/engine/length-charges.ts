@@ -1,0 +1,55 @@
+import { addCharge, netOf, perimeterAmount, refuse, type UnitInHand, wholeQuotient } from './unit-in-hand';
+import { type Rule } from './compile-list';
+import { wholeMinor } from './charge';
+
+/** The charges by length: spacers, grids and edge work. */
+
+/** One row a cavity, on the billed perimeter. */
+export function chargeSpacer(hand: UnitInHand): void {
+  const { unit, list } = hand;
+  const only = unit.cavities.length === 1;
+  for (const [i, { spacer }] of unit.cavities.entries()) {
+    const rule = list.spacers.get(spacer);
+    if (rule) addPerimeterCharge(hand, rule, only ? 0 : i + 1);
+    else refuse(hand, `${list.products.nameOf('spacers', spacer)} spacer`, `/cavities/${i}/spacer`);
+  }
+}
+
+/** The length of all bars, upright ones as long as the billed height, level ones as the billed width; and each crossing. */
+export function chargeGrid(hand: UnitInHand): void {
+  const { unit, list, size } = hand;
+  if (!unit.grid || unit.grid.across + unit.grid.down === 0) return;
+  const { bar, across, down } = unit.grid;
+  const rules = list.grids.get(bar);
+  if (!rules) return refuse(hand, list.products.nameOf('grids', bar), '/grid/bar');
+  const { lengthDivisor, lengthParts, lengthUnit } = list.measures;
+  const parts = size.height.times(across).plus(size.width.times(down));
+  const bars = wholeQuotient(parts.times(rules.bars.factor), lengthDivisor);
+  addGridCharge(hand, rules.bars, bars, parts.dividedBy(lengthParts).toString(), lengthUnit);
+  const crossings = across * down;
+  if (crossings > 0)
+    addGridCharge(hand, rules.crossings, wholeMinor(rules.crossings.factor.times(crossings)), String(crossings), 'crossing');
+}
+
+/** One row a lite whose edges are worked. */
+export function chargeEdgeWork(hand: UnitInHand): void {
+  const { unit, list } = hand;
+  for (const [i, { edgeWork }] of unit.lites.entries()) {
+    if (edgeWork === undefined) continue;
+    const rule = list.edgeWork.get(edgeWork);
+    if (rule) addPerimeterCharge(hand, rule, i + 1);
+    else refuse(hand, `${list.products.nameOf('edgeWork', edgeWork)} edges`, `/lites/${i}/edgeWork`);
+  }
+}
+
+function addPerimeterCharge(hand: UnitInHand, rule: Rule, place: number): void {
+  if (rule.free) return;
+  const amount = perimeterAmount(hand, rule);
+  addCharge(hand, rule, rule.labels[place] ?? '', amount, hand.size.perimeterText, hand.list.measures.lengthUnit);
+}
+
+function addGridCharge(hand: UnitInHand, rule: Rule, listMinor: number, quantity: string, unit: string): void {
+  if (rule.free) return;
+  const netMinor = netOf(listMinor, hand.terms.discounts.grid.keeps);
+  addCharge(hand, rule, rule.labels[0] ?? '', { listMinor, netMinor }, quantity, unit);
+}

@@ -1,0 +1,80 @@
+import { amountOf } from '@shared/money/money';
+import { type Exact, exact } from '@shared/money/exact';
+import { partOf } from './charge';
+import { type CompiledList } from './compile-list';
+import { type BandKind, type BandRule, sizeKey, type SurchargeRule } from './compile-size-charges';
+import { netOf, refuse, type UnitInHand } from './unit-in-hand';
+
+/** What shape and size add: percentages of the area charges at list, and fixed charges. */
+
+/** What the size charges depend on, taken from the actual size. */
+export interface SizeFacts {
+  standard: boolean;
+  /** in each kind the highest band that is exceeded */
+  bands: readonly BandRule[];
+}
+
+/**
+ * Which size charges a unit of `width` × `height` mm meets. The size is that of the bounding
+ * rectangle as ordered, not as billed; a standard size is met as listed, width × height, and not
+ * turned. `Above` is strict. `weightKg` may be null only where
+ * the list has no weight bands.
+ */
+export function sizeFactsOf(width: Exact, height: Exact, weightKg: string | null, list: CompiledList): SizeFacts {
+  const measureOf: Record<BandKind, () => Exact> = {
+    united: () => width.plus(height),
+    'long edge': () => (width.greaterThan(height) ? width : height),
+    area: () => width.times(height),
+    weight: () => exact(weightKg ?? '0'),
+  };
+  const bands: BandRule[] = [];
+  for (const { kind, bands: ofKind } of list.bands) {
+    const actual = measureOf[kind]();
+    const highest = ofKind.find(({ above }) => actual.greaterThan(above));
+    if (highest) bands.push(highest);
+  }
+  return { standard: list.standardSizes.has(sizeKey(width, height)), bands };
+}
+
+/** A rectangle costs nothing more unless the list says so; any other shape needs its rate. */
+export function chargeShape(hand: UnitInHand): void {
+  const shape = hand.unit.shape.class;
+  const rule = hand.list.shapes.get(shape);
+  if (rule) addSurcharge(hand, rule);
+  else if (shape !== 'rectangle') refuse(hand, `the shape ${shape.replace('-', ' ')}`, '/shape/class');
+}
+
+/** Non-standard size, then the band of each kind: they add up. */
+export function chargeSize(hand: UnitInHand, { standard, bands }: SizeFacts): void {
+  if (!standard && hand.list.nonStandard) addSurcharge(hand, hand.list.nonStandard);
+  for (const band of bands) addSurcharge(hand, band);
+}
+
+/** One row for the percentage, one for the fixed charge. */
+function addSurcharge({ sheet, list, terms }: UnitInHand, rule: SurchargeRule): void {
+  const discount = terms.discounts[rule.family];
+  const row = { family: rule.family, discountPercent: discount.percent, discountReason: discount.reason, rule: rule.id };
+  if (rule.part) {
+    const listMinor = partOf(sheet.areaMinor, rule.part);
+    sheet.charges.push({
+      ...row,
+      label: rule.percentLabel,
+      quantity: amountOf(sheet.areaMinor, list.currency),
+      unit: list.currency,
+      rate: rule.partText,
+      listMinor,
+      netMinor: netOf(listMinor, discount.keeps),
+    });
+  }
+  if (rule.fixedMinor > 0) {
+    sheet.charges.push({
+      ...row,
+      label: rule.fixedLabel,
+      quantity: '1',
+      unit: 'unit',
+      rate: rule.fixed,
+      listMinor: rule.fixedMinor,
+      netMinor: netOf(rule.fixedMinor, discount.keeps),
+    });
+  }
+}
