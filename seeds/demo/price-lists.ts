@@ -61,6 +61,7 @@ export const northmereList: PriceListContent = {
     { spacer: 'warm-edge', rate: '0.88' },
   ],
   gases: [
+    { gas: 'air', rate: '0', minimum: '0' },
     { gas: 'argon', rate: '0.55', minimum: '2.00' },
     { gas: 'krypton', rate: '4.75', minimum: '12.00' },
   ],
@@ -207,7 +208,10 @@ export const kestrelFordList: PriceListContent = {
     { spacer: 'stainless', rate: '0.60' },
     { spacer: 'warm-edge', rate: '0.95' },
   ],
-  gases: [{ gas: 'argon', rate: '0.48', minimum: '2.50' }],
+  gases: [
+    { gas: 'air', rate: '0', minimum: '0' },
+    { gas: 'argon', rate: '0.48', minimum: '2.50' },
+  ],
   grids: [{ bar: 'flat-16', rate: '1.05', perCrossing: '0.60' }],
   edgeWork: [
     { edgeWork: 'seamed', rate: '0' },
@@ -282,6 +286,8 @@ export const aldersundList: PriceListContent = {
       [10, '41.00'],
     ]),
     ...byThickness('heat-strengthened', [
+      [4, '19.00'],
+      [5, '20.50'],
       [6, '22.50'],
       [8, '29.50'],
       [10, '39.00'],
@@ -300,6 +306,7 @@ export const aldersundList: PriceListContent = {
     { spacer: 'warm-edge', rate: '2.35' },
   ],
   gases: [
+    { gas: 'air', rate: '0', minimum: '0' },
     { gas: 'argon', rate: '4.80', minimum: '1.90' },
     { gas: 'krypton', rate: '38.00', minimum: '11.00' },
   ],
@@ -371,17 +378,23 @@ export const aldersundList: PriceListContent = {
   })),
 };
 
-/** The same list with every glass, treatment, coating, assembly and gas rate changed by a percentage, to four decimals. */
+/**
+ * The same list with every rate for glass, work and material changed by a percentage (`-3` lowers)
+ * and rounded half up to the cent. What is itself a percentage stays, and so do order charges.
+ */
 export function raise(content: PriceListContent, percent: string): PriceListContent {
   const factor = exact(percent).dividedBy(100).plus(1);
-  const raised = <Row extends { rate: string }>(rows: Row[]): Row[] =>
-    rows.map((row) => ({ ...row, rate: exact(row.rate).times(factor).toDecimalPlaces(4).toFixed() }));
+  const raised = (rate: string) => exact(rate).times(factor).toFixed(2);
+  const rows = <Row extends { rate: string }>(entries: Row[]): Row[] => entries.map((row) => ({ ...row, rate: raised(row.rate) }));
   return {
     ...content,
-    glass: raised(content.glass),
-    treatments: raised(content.treatments),
-    coatings: raised(content.coatings),
-    assembly: raised(content.assembly),
-    gases: raised(content.gases),
+    glass: rows(content.glass),
+    treatments: rows(content.treatments),
+    coatings: rows(content.coatings),
+    assembly: rows(content.assembly),
+    spacers: rows(content.spacers),
+    gases: rows(content.gases).map((row) => ({ ...row, minimum: raised(row.minimum) })),
+    grids: rows(content.grids).map((row) => ({ ...row, perCrossing: raised(row.perCrossing) })),
+    edgeWork: rows(content.edgeWork),
   };
 }
