@@ -13,6 +13,8 @@ import { createAuthentication } from './http/authenticate';
 import { mountRoutes, numberRequest } from './http/mount';
 import { describeApi } from './http/openapi';
 import { type Route, serveAnyone } from './http/serve';
+import { orderRoutes } from './orders/order-routes';
+import { receivableRoutes } from './receivables/receivable-routes';
 
 /** Every route of the API; a test holds them against the list of endpoints. */
 export const routes: Route[] = [
@@ -22,6 +24,8 @@ export const routes: Route[] = [
   ...sessionRoutes,
   ...companyRoutes,
   ...catalogueRoutes,
+  ...orderRoutes,
+  ...receivableRoutes,
 ];
 
 /** The API as an Express application that does not listen. */

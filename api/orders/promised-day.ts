@@ -1,18 +1,15 @@
 import { addWorkingDays, isWorkingDay, type WorkingDays } from '@shared/calendar/days';
 import { type FieldError } from '@shared/contracts/problems';
-
-/** A plant's working days and its lead times by class, the usual one first. */
-export interface LeadTimes extends WorkingDays {
-  leadTimes: readonly { class: string; workingDays: number }[];
-}
+import { type PlantCalendar } from '../database/schema/companies';
+import { leadTimeDays } from '../pricing/lead-time';
 
 /**
- * The first day on which an order placed on `today` can be ready: the lead time of its class
- * (null: the usual one) in working days of the plant.
+ * The first day on which an order placed on `today` can be ready: the lead time of its class in
+ * working days of the plant; of the usual class where it has none, or one no longer offered.
  */
-export function promisedDay(today: string, leadTimeClass: string | null, calendar: LeadTimes): string {
-  const leadTime = calendar.leadTimes.find((time) => time.class === leadTimeClass) ?? calendar.leadTimes[0];
-  return addWorkingDays(today, leadTime?.workingDays ?? 0, calendar);
+export function promisedDay(today: string, leadTimeClass: string | null, calendar: PlantCalendar): string {
+  const days = leadTimeDays(calendar, leadTimeClass) ?? leadTimeDays(calendar, null) ?? 0;
+  return addWorkingDays(today, days, calendar);
 }
 
 /** What is wrong with a required day, if anything, naming the nearest day that would do. */

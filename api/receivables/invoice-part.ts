@@ -3,10 +3,8 @@ import { type Totals } from '@shared/contracts/prices';
 import { minorOf, money, spread } from '@shared/money/money';
 import { type Currency } from '@shared/money/currencies';
 
-/** What a tax falls on, by its label and rate, as the price list says. */
+/** What a tax of the price list falls on. */
 export interface TaxScope {
-  label: string;
-  rate: string;
   on: readonly ('goods' | OrderFamily)[];
 }
 
@@ -22,6 +20,7 @@ export interface PartialDispatch {
   /** units that leave now and later; the measure where goods cost nothing */
   units: number;
   laterUnits: number;
+  /** of the order's taxes, in their order */
   taxScopes: readonly TaxScope[];
   currency: Currency;
 }
@@ -53,7 +52,7 @@ export function invoicePart(part: PartialDispatch): Totals {
   }));
   const taxes = order.tax.map((row, i) => {
     const baseLeft = minor(row.base) - sumOfEarlier((totals) => totals.tax[i]?.base);
-    const scope = part.taxScopes.find(({ label, rate }) => label === row.label && rate === row.rate)?.on ?? [];
+    const scope = part.taxScopes[i]?.on ?? [];
     const taxed =
       (scope.includes('goods') ? goodsMinor : 0) +
       charges.reduce((sum, charge) => (scope.includes(charge.family) ? sum + charge.minor : sum), 0);

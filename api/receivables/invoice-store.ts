@@ -71,6 +71,10 @@ export function invoiceStore(db: Db) {
     ofOrder: (orderId: string): InvoiceRow[] =>
       db.select().from(invoices).where(eq(invoices.orderId, orderId)).orderBy(asc(invoices.sequence)).all(),
 
+    newestOfOrder: (orderId: string): string | undefined =>
+      db.select({ id: invoices.id }).from(invoices).where(eq(invoices.orderId, orderId)).orderBy(desc(invoices.sequence)).limit(1).get()
+        ?.id,
+
     /** Adds signed minor units to what is open; the database refuses to go below zero or above the total. */
     addToOpen: (id: string, change: number) => addToOpen.run({ id, change }),
 
