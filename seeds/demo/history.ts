@@ -8,6 +8,7 @@ import { type Dependencies } from '@api/dependencies';
 import { dispatchOrder } from '@api/orders/dispatch-order';
 import { moveOrder } from '@api/orders/move-order';
 import { placeOrder } from '@api/orders/place-order';
+import { readOrder } from '@api/orders/read-order';
 import { createQuote } from '@api/quotes/create-quote';
 import { readInvoice } from '@api/receivables/read-invoice';
 import { recordReceipt } from '@api/receivables/record-receipt';
@@ -147,7 +148,8 @@ function order(dealer: DemoDealer, today: string, unfolding: Unfolding): boolean
 function take(placed: Order, dealer: DemoDealer, today: string, unfolding: Unfolding): void {
   const { by, dependencies, act } = unfolding;
   const maker = demoFabricators.find(({ id }) => id === placed.fabricator.id)!;
-  const move = (actor: Member, to: Order['state'], reason?: string) => moveOrder(actor, { params: { id: placed.id }, body: { to, reason } }, dependencies);
+  const move = (actor: Member, to: Order['state'], reason?: string) =>
+    moveOrder(actor, { params: { id: placed.id }, body: { to, reason } }, dependencies);
   if (placed.state !== 'submitted') return;
   if (by.happens(0.02)) {
     move(act('buyer', dealer.id), 'cancelled', by.pick(['Customer withdrew', 'Measured again, other sizes', 'Ordered twice']));
@@ -188,9 +190,9 @@ function send(placed: Order, dealer: DemoDealer, today: string, unfolding: Unfol
 /** The newest invoice of the order is paid early for the discount, at its time, late, short, or not at all. */
 function expectPayment(sent: Order, dealer: DemoDealer, today: string, unfolding: Unfolding): void {
   const { by, dependencies, act } = unfolding;
-  const invoiceId = dependencies.stores.invoices.newestOfOrder(sent.id);
-  if (!invoiceId || by.happens(0.012)) return;
   const clerk = act('accounts', sent.fabricator.id);
+  const invoiceId = readOrder(clerk, { params: { id: sent.id } }, dependencies).dispatches.at(-1)?.invoice?.id;
+  if (!invoiceId || by.happens(0.012)) return;
   const invoice = readInvoice(clerk, { params: { id: invoiceId } }, dependencies);
   const takesDiscount = invoice.discount !== null && dealer.paysLate < 0 && by.happens(0.8);
   const due = takesDiscount ? addDays(invoice.discount!.until, -by.whole(0, 2)) : addDays(invoice.dueOn, dealer.paysLate + by.whole(-3, 8));
@@ -225,7 +227,11 @@ function pay(invoiceId: string, takesDiscount: boolean, paidOn: string, { by, de
         amount: amountOf(receivedMinor, currency),
         payerReference: by.happens(0.7) ? invoice.reference : `Invoice ${invoice.number}`,
         allocations: [
-          { invoice: invoiceId, amount: amountOf(appliedMinor, currency), ...(discountMinor > 0 ? { discount: amountOf(discountMinor, currency) } : {}) },
+          {
+            invoice: invoiceId,
+            amount: amountOf(appliedMinor, currency),
+            ...(discountMinor > 0 ? { discount: amountOf(discountMinor, currency) } : {}),
+          },
         ],
       },
       idempotencyKey: newKey(),
@@ -236,4 +242,3 @@ function pay(invoiceId: string, takesDiscount: boolean, paidOn: string, { by, de
 
 /** The day it is at the market's own place. */
 export const marketDay = (at: number): string => dayIn('America/New_York', at);
-
