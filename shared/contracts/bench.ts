@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import * as z from 'zod';
 import { catalogueSchema } from './catalogue';
 import { endpoint } from './endpoint';
 import { evaluateRequest, evaluationSchema } from './evaluation';

@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import * as z from 'zod';
 import { endpoint } from './endpoint';
 import { currency, day, id, instant, line, moneySchema, named, pageOf, pageQuery } from './primitives';
 import { pricedLine, totalsSchema } from './prices';

@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import * as z from 'zod';
 import { reasonSchema } from './evaluation';
 import { instant, id, line, moneySchema, named, quantity } from './primitives';
 import { orderFamily, rowFamily } from './price-lists';

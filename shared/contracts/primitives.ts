@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import * as z from 'zod';
 import { currencies } from '../money/currencies';
 
 /** Field shapes that several contracts share. */

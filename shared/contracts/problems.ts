@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import * as z from 'zod';
 
 /** Every problem the API answers with (RFC 9457, July 2023). The key is the last part of `type`. */
 export const problems = {

@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import * as z from 'zod';
 import { endpoint } from './endpoint';
 import { currency, day, id, instant, line, markUp, moneySchema, named, pageOf, pageQuery, quantity, text } from './primitives';
 import { lineInput, pricedLine, totalsSchema } from './prices';

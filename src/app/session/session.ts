@@ -2,10 +2,13 @@ import { isPlatformBrowser } from '@angular/common';
 import { computed, DOCUMENT, inject, Injectable, PLATFORM_ID, signal } from '@angular/core';
 import { firstValueFrom } from 'rxjs';
 import { type EndpointId } from '@shared/contracts/endpoints';
-import { me, signIn, signOut, type User } from '@shared/contracts/session';
+import { type User } from '@shared/contracts/session';
 import { mayCall } from '@shared/contracts/who-may-call';
 import { ApiClient } from '../api-client/api-client';
 import { ProblemError } from '../api-client/problem-error';
+
+/** The schemas come when they are needed: most visitors read pages and never sign in. */
+const contracts = () => import('@shared/contracts/session');
 
 /** Who is signed in. On the server nobody is: public pages are rendered for visitors. */
 @Injectable({ providedIn: 'root' })
@@ -26,6 +29,7 @@ export class Session {
       return;
     }
     try {
+      const { me } = await contracts();
       this.found.set((await firstValueFrom(this.api.call(me))).user);
     } catch (error) {
       this.found.set(null);
@@ -35,12 +39,14 @@ export class Session {
 
   /** @throws ProblemError `wrong-credentials` or `too-many` */
   async signIn(email: string, password: string): Promise<User> {
+    const { signIn } = await contracts();
     const { user } = await firstValueFrom(this.api.call(signIn, { body: { email, password } }));
     this.found.set(user);
     return user;
   }
 
   async signOut(): Promise<void> {
+    const { signOut } = await contracts();
     await firstValueFrom(this.api.call(signOut));
     this.found.set(null);
   }
