@@ -13,6 +13,7 @@ import { createAuthentication } from './http/authenticate';
 import { mountRoutes, numberRequest } from './http/mount';
 import { describeApi } from './http/openapi';
 import { type Route, serveAnyone } from './http/serve';
+import { priceRoutes } from './pricing/price-routes';
 import { orderRoutes } from './orders/order-routes';
 import { receivableRoutes } from './receivables/receivable-routes';
 
@@ -24,6 +25,7 @@ export const routes: Route[] = [
   ...sessionRoutes,
   ...companyRoutes,
   ...catalogueRoutes,
+  ...priceRoutes,
   ...orderRoutes,
   ...receivableRoutes,
 ];
