@@ -171,6 +171,28 @@ describe('buildabilityOf', () => {
     ]);
   });
 
+  it('finds a glass that it both works and can treat', () => {
+    const maker = narrowMaker();
+    maker.capabilities.glass = ['clear-4', 'clear-6'].map((glass) => ({ glass, maxLong: '2438.4', maxShort: '1524' }));
+    maker.capabilities.treatments = maker.capabilities.treatments.map((row) => ({ ...row, minNominalMm: 5 }));
+    const { reasons } = at(unitFactory(), maker);
+    expect(reasons.map(({ code, nearestValue }) => [code, nearestValue])).toEqual(
+      [1, 2].flatMap(() => [
+        ['glass-not-made', 'clear-6'],
+        ['treatment-thickness-min', 'clear-6'],
+      ]),
+    );
+  });
+
+  it('finds a cavity width that suits the grid too', () => {
+    const maker = narrowMaker();
+    maker.capabilities.grids = [{ bar: 'flat-16', minCavity: '14' }];
+    const { reasons } = at(narrowUnit({ grid: { bar: 'flat-16', across: 1, down: 1 }, cavities: [{ ...cavity, width: '12' }] }), maker);
+    expect(reasons).toEqual([
+      expect.objectContaining({ code: 'grid-cavity-min', limit: '14 mm', nearestValue: '16', pointer: '/cavities/0/width' }),
+    ]);
+  });
+
   it('counts lites and overall thickness', () => {
     const { reasons } = at(tripleFactory(), narrowMaker());
     expect(reasons.map(({ code }) => code)).toEqual(['lites-max', 'coating-max', 'spacer-not-made', 'spacer-not-made', 'overall-max']);

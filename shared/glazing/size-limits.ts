@@ -4,7 +4,7 @@ import { formatLengthBoth } from '../measures/format-length';
 import { formatArea, formatWeight } from '../measures/format-quantity';
 import { geometryOf } from './geometry';
 import { nearestSize, type SizeLimits } from './nearest-size';
-import { ovenFor } from './part-limits';
+import { ovenFor } from './oven-for';
 import type { ResolvedUnit } from './resolve-unit';
 import { weightOf } from './weight';
 

@@ -11,7 +11,7 @@ export function checksPage(subjects: readonly { subject: string; checks: readonl
       '| --- | --- | --- | ---: | ---: | ---: | ---: |',
       ...checks.map(({ what, source, mark, expected, tolerance, ours }) => {
         const value = ours();
-        return `| ${[what, source, mark, digits(expected), digits(value), difference(value - expected), tolerance === 0 ? 'none' : digits(tolerance)].join(' | ')} |`;
+        return `| ${[what, source, mark, digits(expected), digits(value), difference(value - expected, tolerance), tolerance === 0 ? 'none' : digits(tolerance)].join(' | ')} |`;
       }),
       '',
     ].join('\n'),
@@ -33,7 +33,7 @@ function digits(value: number): string {
   return String(Number(value.toPrecision(6)));
 }
 
-/** Below a millionth of a millionth nothing is meant. */
-function difference(value: number): string {
-  return Math.abs(value) < 1e-12 ? '0' : String(Number(value.toPrecision(2)));
+/** A difference far below what is allowed is the noise of binary numbers, and another machine's noise is another. */
+function difference(value: number, tolerance: number): string {
+  return Math.abs(value) < Math.max(tolerance / 1000, 1e-12) ? '0' : String(Number(value.toPrecision(2)));
 }

@@ -49,7 +49,7 @@ const shapes: Shaped[] = [
 const areas: Check[] = shapes.map(({ name, width, height, shape, rise }) => {
   const ends = [0, ...(bends[name] ?? []), width];
   return {
-    what: `Area of a ${name}, mm²`,
+    what: `Area, ${name}, mm²`,
     source: 'its upper edge integrated by Simpson’s rule',
     mark: 'another way' as const,
     expected: ends.slice(1).reduce((sum, end, i) => sum + integrate(rise, ends[i]!, end), 0),
