@@ -15,6 +15,9 @@ export interface ReceiptFilter {
 // Written out, not bound: SQLite takes a partial index only where it can see its condition.
 const isUnapplied = sql`${receipts.unappliedMinor} > 0`;
 
+// Allocations of one call share their instant; the order of their rows is the order they were asked for in.
+const asWritten = sql`${allocations}.rowid`;
+
 /** Rows of receipts and of what was applied of them. */
 export function receiptStore(db: Db) {
   const named = () =>
@@ -98,17 +101,17 @@ export function receiptStore(db: Db) {
         .select()
         .from(allocations)
         .where(and(eq(allocations.receiptId, receiptId), isNull(allocations.reversedAt)))
-        .orderBy(asc(allocations.at), asc(allocations.id))
+        .orderBy(asc(allocations.at), asWritten)
         .all(),
 
     markAllocationReversed: (id: string, reversedAt: number, reversedReason: string) =>
       db.update(allocations).set({ reversedAt, reversedReason }).where(eq(allocations.id, id)).run(),
 
     allocationsOfReceipt: (receiptId: string) =>
-      allocated().where(eq(allocations.receiptId, receiptId)).orderBy(asc(allocations.at), asc(allocations.id)).all(),
+      allocated().where(eq(allocations.receiptId, receiptId)).orderBy(asc(allocations.at), asWritten).all(),
 
     allocationsOfInvoice: (invoiceId: string) =>
-      allocated().where(eq(allocations.invoiceId, invoiceId)).orderBy(asc(allocations.at), asc(allocations.id)).all(),
+      allocated().where(eq(allocations.invoiceId, invoiceId)).orderBy(asc(allocations.at), asWritten).all(),
   };
 }
 export type AllocatedRow = ReturnType<ReturnType<typeof receiptStore>['allocationsOfReceipt']>[number];

@@ -18,7 +18,7 @@ import { type ReceiptRow } from './receipt-store';
  * Records money received by bank transfer and applies it to invoices as asked; the rest stays
  * unapplied cash of the account. The books take it on the day it was received.
  *
- * @throws Refusal `invalid` at the field, `key-reused`
+ * @throws Refusal `not-found` for an account that is not theirs, `invalid` at the field, `key-reused`
  */
 export function recordReceipt(
   actor: Member,
@@ -29,10 +29,15 @@ export function recordReceipt(
   const call = { endpoint: 'receipts.record', key: idempotencyKey, request: body };
   const id = doOnce(actor, call, dependencies, () => {
     const account = stores.companies.tradeAccountOf(actor.companyId, body.tradeAccount);
-    if (!account) refuse('/tradeAccount', 'is no trade account of yours');
+    if (!account)
+      throw new Refusal('not-found', 'There is no such trade account of yours.', [
+        { pointer: '/tradeAccount', detail: 'is none of yours' },
+      ]);
     const maker = stores.orders.maker(actor.companyId);
     const at = clock();
-    if (body.receivedOn > dayIn(maker.timeZone, at)) refuse('/receivedOn', 'is still to come');
+    if (body.receivedOn > dayIn(maker.timeZone, at)) {
+      throw new Refusal('invalid', '/receivedOn: is still to come', [{ pointer: '/receivedOn', detail: 'is still to come' }]);
+    }
     const amountMinor = amountAt('/amount', body.amount, account.currency);
     const receipt: ReceiptRow = {
       id: newId(),
@@ -67,8 +72,4 @@ export function recordReceipt(
     return receipt.id;
   });
   return readReceipt(actor, { params: { id } }, dependencies);
-}
-
-function refuse(pointer: string, detail: string): never {
-  throw new Refusal('invalid', `${pointer}: ${detail}`, [{ pointer, detail }]);
 }
