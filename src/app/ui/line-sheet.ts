@@ -11,7 +11,9 @@ import { type MeasureSystem } from '@shared/measures/parse-length';
   template: ``,
 })
 export class LineSheet {
-  readonly line = input.required<Pick<PricedLine, 'charges' | 'unitPrice' | 'linePrice'> & { unit: Unit; quantity: number; tag: string | null }>();
+  readonly line = input.required<
+    Pick<PricedLine, 'charges' | 'unitPrice' | 'linePrice'> & { unit: Unit; quantity: number; tag: string | null }
+  >();
   readonly priceList = input.required<{ name: string; effectiveFrom: string }>();
   readonly system = input.required<MeasureSystem>();
 }
