@@ -1,8 +1,6 @@
-import { dayIn } from '@shared/calendar/days';
 import { type priceLinesEndpoint } from '@shared/contracts/bench';
 import { type AnswerOf } from '@shared/contracts/endpoint';
 import { type Reason } from '@shared/contracts/evaluation';
-import { type PriceListVersion } from '@shared/contracts/price-lists';
 import { type Offer, type PriceRequest } from '@shared/contracts/prices';
 import { pointer, Refusal } from '@shared/contracts/problems';
 import { demandPossible } from '../catalogue/demand-possible';
@@ -11,25 +9,16 @@ import { type TradeAccountRow } from '../companies/company-store';
 import { type Dependencies } from '../dependencies';
 import { type Input } from '../http/serve';
 import { type CheckedUnit, checkUnits } from './check-units';
-import { destinationOf } from './destination-of';
+import { type Circumstances, circumstancesOf } from './circumstances-of';
 import { totalsToWire } from './engine/rows-to-wire';
 import { totalOrder } from './engine/total-order';
 import { findOpenAccount } from './find-open-account';
-import { leadTimeDays } from './lead-time';
 import { priceLinesAt } from './price-lines-at';
-import { termsOf } from './terms-of';
 
 type Needs = Pick<Dependencies, 'stores' | 'catalogue'>;
 
 /** One account with all that its offer is made from. */
-interface Asked {
-  account: TradeAccountRow;
-  /** working days for the class asked for; null when the maker has no such class */
-  leadDays: number | null;
-  version: PriceListVersion | undefined;
-  terms: ReturnType<typeof termsOf>;
-  destination: ReturnType<typeof destinationOf> | null;
-}
+type Asked = Circumstances & { account: TradeAccountRow };
 
 /**
  * Offers for the same lines from every fabricator with whom the dealer has an open trade account,
@@ -54,11 +43,13 @@ export function priceUnits(
     catalogue(),
   );
 
-  const asked = accounts.map((account) => circumstancesOf(account, actor, body, at, stores));
+  const asked = accounts.map((account): Asked => ({ account, ...circumstancesOf(account, body, at, stores) }));
   demandKnown(body, asked);
   const [only] = asked;
   if (body.tradeAccount !== undefined && only && !only.version) {
-    throw new Refusal('no-price-list', `${only.account.fabricatorName} has no price list in force at that time.`);
+    throw new Refusal('no-price-list', `${only.account.fabricatorName} has no price list in force at that time.`, [
+      { pointer: '/tradeAccount', detail: 'its maker has no price list in force at that time' },
+    ]);
   }
   const checked = checkUnits(
     body.lines.map(({ unit }) => unit),
@@ -70,31 +61,10 @@ export function priceUnits(
   };
 }
 
-function circumstancesOf(
-  account: TradeAccountRow,
-  actor: Member,
-  { shipTo, leadTimeClass, promotionCode }: PriceRequest,
-  at: number,
-  stores: Dependencies['stores'],
-): Asked {
-  const maker = stores.companies.company(account.fabricatorId);
-  const plant = stores.companies.fabricator(account.fabricatorId);
-  if (!maker || !plant) throw new Error(`no fabricator ${account.fabricatorId}`);
-  const on = dayIn(maker.timeZone, at);
-  const nowhere = shipTo === undefined && !stores.companies.firstAddressOf(actor.companyId);
-  return {
-    account,
-    leadDays: leadTimeDays(plant.calendar, leadTimeClass ?? null),
-    version: stores.priceLists.inForce(account.fabricatorId, account.currency, at),
-    terms: termsOf(account, on, promotionCode ?? null, stores),
-    destination: nowhere ? null : destinationOf(actor.companyId, shipTo, on, stores),
-  };
-}
-
 /** A class or code that none of the makers asked knows is a slip of the pen. */
 function demandKnown({ leadTimeClass, promotionCode }: PriceRequest, asked: readonly Asked[]): void {
   if (asked.length === 0) return;
-  if (leadTimeClass !== undefined && asked.every(({ leadDays }) => leadDays === null)) {
+  if (leadTimeClass !== undefined && asked.every(({ leadTimeDays }) => leadTimeDays === null)) {
     throw unknownField('/leadTimeClass', `no maker asked has a lead time called “${leadTimeClass}”`);
   }
   if (promotionCode !== undefined && !asked.some(({ terms }) => terms.promotions.some(({ code }) => code === promotionCode))) {
@@ -105,7 +75,7 @@ function demandKnown({ leadTimeClass, promotionCode }: PriceRequest, asked: read
 const unknownField = (at: string, detail: string) => new Refusal('invalid', `${at}: ${detail}`, [{ pointer: at, detail }]);
 
 function offerOf(
-  { account, leadDays, version, terms, destination }: Asked,
+  { account, leadTimeDays, version, terms, destination }: Asked,
   { lines, leadTimeClass }: PriceRequest,
   checked: readonly CheckedUnit[],
   { catalogue }: Needs,
@@ -120,7 +90,7 @@ function offerOf(
   const without = (reasons: Offer['reasons']): Offer => ({ ...head, canBuild: false, reasons, leadTimeDays: null, lines: [] });
 
   if (!version) return without([wholeOffer('no-price-list', 'has no price list in force at that time', 'a list in force', 'none', '/at')]);
-  if (leadDays === null) {
+  if (leadTimeDays === null) {
     return without([
       wholeOffer('no-lead-time', 'has no such lead time', 'lead times of this maker', leadTimeClass ?? 'none', '/leadTimeClass'),
     ]);
@@ -140,7 +110,7 @@ function offerOf(
     ...head,
     canBuild: true,
     reasons: [],
-    leadTimeDays: leadDays,
+    leadTimeDays,
     lines: answer.lines.map(({ sheet }) => sheet),
     ...totalsToWire(total.totalled),
   };
