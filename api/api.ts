@@ -14,6 +14,7 @@ import { mountRoutes, numberRequest } from './http/mount';
 import { describeApi } from './http/openapi';
 import { type Route, serveAnyone } from './http/serve';
 import { priceRoutes } from './pricing/price-routes';
+import { quoteRoutes } from './quotes/quote-routes';
 import { orderRoutes } from './orders/order-routes';
 import { receivableRoutes } from './receivables/receivable-routes';
 
@@ -26,6 +27,7 @@ export const routes: Route[] = [
   ...companyRoutes,
   ...catalogueRoutes,
   ...priceRoutes,
+  ...quoteRoutes,
   ...orderRoutes,
   ...receivableRoutes,
 ];
