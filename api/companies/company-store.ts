@@ -37,26 +37,43 @@ export function companyStore(db: Db) {
     fabricatorName: row.fabricatorName,
   });
 
-  return {
-    company: (id: string) => db.select().from(companies).where(eq(companies.id, id)).get(),
+  // Asked for by every price, order and credit check: built once.
+  const id = sql.placeholder('id');
+  const companyById = db.select().from(companies).where(eq(companies.id, id)).prepare();
+  const fabricatorById = db.select().from(fabricators).where(eq(fabricators.companyId, id)).prepare();
+  const accountById = accounts().where(eq(tradeAccounts.id, id)).prepare();
+  const balancesById = db.select().from(accountBalances).where(eq(accountBalances.tradeAccountId, id)).prepare();
+  const addition = (column: 'receivableMinor' | 'unappliedMinor' | 'reservedMinor') =>
+    sql`${accountBalances[column]} + ${sql.placeholder(column)}`;
+  const addToBalances = db
+    .update(accountBalances)
+    .set({
+      receivableMinor: addition('receivableMinor'),
+      unappliedMinor: addition('unappliedMinor'),
+      reservedMinor: addition('reservedMinor'),
+    })
+    .where(eq(accountBalances.tradeAccountId, id))
+    .prepare();
+  const tradeAccount = (accountId: string): TradeAccountRow | undefined => {
+    const row = accountById.get({ id: accountId });
+    return row && flat(row);
+  };
 
-    fabricator: (id: string) => db.select().from(fabricators).where(eq(fabricators.companyId, id)).get(),
+  return {
+    company: (companyId: string) => companyById.get({ id: companyId }),
+
+    fabricator: (companyId: string) => fabricatorById.get({ id: companyId }),
 
     allFabricators: () =>
       db.select().from(fabricators).innerJoin(companies, eq(companies.id, fabricators.companyId)).orderBy(asc(companies.name)).all(),
 
     /** A trade account of this company, on either side of it. */
     tradeAccountOf: (companyId: string, accountId: string): TradeAccountRow | undefined => {
-      const row = accounts()
-        .where(and(eq(tradeAccounts.id, accountId), or(eq(tradeAccounts.dealerId, companyId), eq(tradeAccounts.fabricatorId, companyId))))
-        .get();
-      return row && flat(row);
+      const row = tradeAccount(accountId);
+      return row && (row.dealerId === companyId || row.fabricatorId === companyId) ? row : undefined;
     },
 
-    tradeAccount: (accountId: string): TradeAccountRow | undefined => {
-      const row = accounts().where(eq(tradeAccounts.id, accountId)).get();
-      return row && flat(row);
-    },
+    tradeAccount,
 
     openAccountsOfDealer: (dealerId: string): TradeAccountRow[] =>
       accounts()
@@ -86,22 +103,14 @@ export function companyStore(db: Db) {
 
     /** @throws Error when the account has no balances: each account is made with them */
     balances: (accountId: string): typeof accountBalances.$inferSelect => {
-      const found = db.select().from(accountBalances).where(eq(accountBalances.tradeAccountId, accountId)).get();
+      const found = balancesById.get({ id: accountId });
       if (!found) throw new Error(`no balances of trade account ${accountId}`);
       return found;
     },
 
     /** Adds signed minor units to the cached balances; the database refuses what would fall below zero. */
     addToBalances: (accountId: string, change: { receivableMinor?: number; unappliedMinor?: number; reservedMinor?: number }) =>
-      db
-        .update(accountBalances)
-        .set({
-          receivableMinor: sql`${accountBalances.receivableMinor} + ${change.receivableMinor ?? 0}`,
-          unappliedMinor: sql`${accountBalances.unappliedMinor} + ${change.unappliedMinor ?? 0}`,
-          reservedMinor: sql`${accountBalances.reservedMinor} + ${change.reservedMinor ?? 0}`,
-        })
-        .where(eq(accountBalances.tradeAccountId, accountId))
-        .run(),
+      addToBalances.run({ receivableMinor: 0, unappliedMinor: 0, reservedMinor: 0, ...change, id: accountId }),
 
     addressOf: (companyId: string, addressId: string) =>
       db

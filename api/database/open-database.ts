@@ -1,6 +1,7 @@
 import { mkdirSync, readFileSync } from 'node:fs';
 import { dirname, join } from 'node:path';
 import Sqlite from 'better-sqlite3';
+import { LRUCache } from 'lru-cache';
 import { type BetterSQLite3Database, drizzle } from 'drizzle-orm/better-sqlite3';
 import { migrate } from 'drizzle-orm/better-sqlite3/migrator';
 
@@ -41,6 +42,7 @@ export function openDatabase(file: string, migrationsFolder: string): Database {
   sqlite.pragma('foreign_keys = ON');
   sqlite.pragma('temp_store = MEMORY');
   sqlite.pragma('cache_size = -65536');
+  keepStatements(sqlite);
   refuseNewer(sqlite, file, migrationsFolder);
   const db = drizzle(sqlite);
   // Concurrent starts must not both migrate: drizzle's migrator runs in a transaction of its own, deferred.
@@ -74,6 +76,20 @@ export function openDatabase(file: string, migrationsFolder: string): Database {
       sqlite.close();
     },
   };
+}
+
+/**
+ * Compiling a statement costs more than running most of them, and queries that are built anew
+ * come out as the same text again and again: keeps what was compiled by its text.
+ */
+function keepStatements(sqlite: Sqlite.Database): void {
+  const compile = sqlite.prepare.bind(sqlite);
+  const kept = new LRUCache<string, Sqlite.Statement>({ max: 500 });
+  sqlite.prepare = ((text: string) => {
+    let statement = kept.get(text);
+    if (!statement) kept.set(text, (statement = compile(text)));
+    return statement;
+  }) as typeof sqlite.prepare;
 }
 
 function refuseNewer(sqlite: Sqlite.Database, file: string, migrationsFolder: string): void {

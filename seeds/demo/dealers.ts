@@ -5,7 +5,6 @@ export interface DemoAccount {
   tier: 'A' | 'B' | 'C';
   /** in whole currency units */
   limit: number;
-  onHold?: boolean;
   countsFrom?: 'placement' | 'dispatch';
 }
 
@@ -145,15 +144,7 @@ const more: [
     { maker: 'northmere', tier: 'C', limit: 70_000 },
     { maker: 'aldersund', tier: 'A', limit: 20_000 },
   ],
-  [
-    'Cobble Hill Glazing',
-    'Cobble Hill',
-    'Jules Ponder',
-    'Rhea Stott',
-    7,
-    30,
-    { maker: 'northmere', tier: 'B', limit: 60_000, onHold: true },
-  ],
+  ['Cobble Hill Glazing', 'Cobble Hill', 'Jules Ponder', 'Rhea Stott', 7, 30, { maker: 'northmere', tier: 'B', limit: 60_000 }],
   ['Fennel Road Conservatories', 'Fennel', 'Ada Birch', 'Noel Parish', 5, 3, { maker: 'kestrel-ford', tier: 'B', limit: 60_000 }],
   [
     'Three Elms Windows',

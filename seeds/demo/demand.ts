@@ -93,6 +93,9 @@ const season = [0.6, 0.7, 0.95, 1.15, 1.25, 1.15, 1.05, 1.05, 1.2, 1.25, 1.0, 0.
 
 export const seasonOf = (day: string): number => season[Number(day.slice(5, 7)) - 1] ?? 1;
 
+/** Inches as millimetres, without the digits that binary floats add. */
+const mm = (inches: number) => String(Number((inches * 25.4).toFixed(4)));
+
 /** Standard sizes in mm of the lists that have them: dealers know them and use them. */
 const standard: Record<string, [string, string][]> = {
   northmere: (
@@ -112,9 +115,6 @@ const standard: Record<string, [string, string][]> = {
     ['788', '988'],
   ],
 };
-
-/** Inches as millimetres, without the digits that binary floats add. */
-const mm = (inches: number) => String(Number((inches * 25.4).toFixed(4)));
 
 function sizeFor(maker: string, by: Chance): [string, string] {
   const standardSizes = standard[maker];

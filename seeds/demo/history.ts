@@ -10,6 +10,8 @@ import { moveOrder } from '@api/orders/move-order';
 import { placeOrder } from '@api/orders/place-order';
 import { readOrder } from '@api/orders/read-order';
 import { createQuote } from '@api/quotes/create-quote';
+import { changeCredit } from '@api/receivables/change-credit';
+import { readCredit } from '@api/receivables/read-credit';
 import { readInvoice } from '@api/receivables/read-invoice';
 import { recordReceipt } from '@api/receivables/record-receipt';
 import { type Chance, chance } from './chance';
@@ -19,6 +21,8 @@ import { tradeAccountId } from './load-companies';
 import { customerFor, linesFor, seasonOf } from './demand';
 
 const HOUR_MS = 3_600_000;
+/** The end of the history, in which some invoices are left as they are. */
+const RECENT_DAYS = 75;
 
 /** Something that happens on a day of the history. */
 type Event = (today: string) => void;
@@ -70,13 +74,29 @@ export function unfoldHistory(dependencies: Dependencies, setClock: (at: number)
     unfolding.agenda.delete(today);
     if (!isWorkingDay(today, { workingDays: [1, 2, 3, 4, 5], closed: [] })) continue;
     for (const dealer of demoDealers) {
-      if (!by.happens((dealer.ordersAMonth * seasonOf(today)) / 21)) continue;
+      if (!by.happens((dealer.ordersAMonth * seasonOf(today)) / 23)) continue;
       tick();
       if (order(dealer, today, unfolding)) placed += 1;
     }
   }
   setClock(Date.parse(`${until}T08:00:00Z`) - HOUR_MS);
+  endings(unfolding);
   return placed;
+}
+
+/** How things stand at the end: one account near its limit, one on hold. */
+function endings({ dependencies, act }: Unfolding): void {
+  const clerk = act('accounts', 'northmere');
+  const near = tradeAccountId('millrace', 'northmere');
+  const { exposure } = readCredit(clerk, { params: { id: near } }, dependencies);
+  const limit = amountOf(Math.max(0, minorOf(exposure.amount, exposure.currency)) + 45_000, exposure.currency);
+  changeCredit(clerk, { params: { id: near }, body: { limit, reason: 'Pays late: limit brought down to what is open' } }, dependencies);
+  const held = tradeAccountId('cobble-hill', 'northmere');
+  changeCredit(
+    clerk,
+    { params: { id: held }, body: { onHold: true, reason: 'A month behind and no answer to two letters' } },
+    dependencies,
+  );
 }
 
 function actorOf(personId: string, { stores }: Dependencies): Member {
@@ -192,7 +212,9 @@ function expectPayment(sent: Order, dealer: DemoDealer, today: string, unfolding
   const { by, dependencies, act } = unfolding;
   const clerk = act('accounts', sent.fabricator.id);
   const invoiceId = readOrder(clerk, { params: { id: sent.id } }, dependencies).dispatches.at(-1)?.invoice?.id;
-  if (!invoiceId || by.happens(0.012)) return;
+  if (!invoiceId) return;
+  // Only lately: what nobody pays for months would stop the dealer's orders, as overdue does.
+  if (daysBetween(today, unfolding.until) < RECENT_DAYS && by.happens(0.1)) return;
   const invoice = readInvoice(clerk, { params: { id: invoiceId } }, dependencies);
   const takesDiscount = invoice.discount !== null && dealer.paysLate < 0 && by.happens(0.8);
   const due = takesDiscount ? addDays(invoice.discount!.until, -by.whole(0, 2)) : addDays(invoice.dueOn, dealer.paysLate + by.whole(-3, 8));
@@ -206,7 +228,8 @@ const workingDayFrom = (day: string): string => {
   return at;
 };
 
-function pay(invoiceId: string, takesDiscount: boolean, paidOn: string, { by, dependencies, newKey }: Unfolding, clerk: Member): void {
+function pay(invoiceId: string, takesDiscount: boolean, paidOn: string, unfolding: Unfolding, clerk: Member): void {
+  const { by, dependencies, newKey } = unfolding;
   const invoice = readInvoice(clerk, { params: { id: invoiceId } }, dependencies);
   const { currency } = invoice;
   const openMinor = minorOf(invoice.open.amount, currency);
@@ -238,6 +261,8 @@ function pay(invoiceId: string, takesDiscount: boolean, paidOn: string, { by, de
     },
     dependencies,
   );
+  // What was short is asked for, and comes within days.
+  if (short) arrange(unfolding, workingDayFrom(addDays(paidOn, by.whole(4, 12))), (day) => pay(invoiceId, false, day, unfolding, clerk));
 }
 
 /** The day it is at the market's own place. */

@@ -153,7 +153,8 @@ export function loadCompanies(db: Db, passwordHash: string, at: number): void {
           limitMinor: minorOf(String(account.limit), maker.currency),
           countsFrom: account.countsFrom ?? 'placement',
           onHold: false,
-          graceDays: 15,
+          // A maker who knows that a dealer pays late gives it longer before it stops its orders.
+          graceDays: dealer.paysLate > 8 ? 45 : 15,
           createdAt: at,
         })
         .run();
