@@ -85,6 +85,16 @@ describe('buildabilityOf', () => {
     expect(reasons).toEqual([expect.objectContaining({ code: 'aspect-max', nearest: null, nearestValue: null, pointer: '/height' })]);
   });
 
+  it('knows none where the edge that comes in would become too short for the other', () => {
+    const maker = wideWith({ maxAreaM2: 0.15, maxAspect: 2 });
+    expect(at(narrowUnit({ width: '600', height: '600' }), maker).reasons).toEqual([
+      expect.objectContaining({ code: 'area-max', nearestValue: null }),
+    ]);
+    expect(at(narrowUnit({ width: '600', height: '600' }), wideWith({ maxAreaM2: 0.15, maxAspect: 3 })).reasons[0]?.nearestValue).toBe(
+      '250',
+    );
+  });
+
   it.each<[string, Partial<UnitInput>, string, string, string | null]>([
     [
       'a glass it does not work',
@@ -182,6 +192,13 @@ describe('buildabilityOf', () => {
         ['treatment-thickness-min', 'clear-6'],
       ]),
     );
+  });
+
+  it('finds a cavity that is not too wide for the gas', () => {
+    const maker = narrowMaker();
+    maker.capabilities.spacers = [{ spacer: 'stainless', widths: ['12', '16', '18', '20'] }];
+    const { reasons } = at(narrowUnit({ cavities: [{ ...cavity, width: '20' }] }), maker);
+    expect(reasons).toEqual([expect.objectContaining({ code: 'gas-cavity-max', limit: '16 mm', actual: '20 mm', nearestValue: '16' })]);
   });
 
   it('finds a cavity width that suits the grid too', () => {

@@ -57,6 +57,15 @@ describe('liteOptics', () => {
     for (const key of Object.keys(optics) as (keyof typeof optics)[]) expect(built[key]).toBeCloseTo(optics[key], 12);
   });
 
+  it('sends light through tinted glass once on the way in and twice on the way back', () => {
+    const { optics } = coating('low-e-soft', 2).item;
+    const built = liteOptics({ glass: glass('grey-6'), coating: coating('low-e-soft', 2) });
+    const ratio = 0.46 / 0.84;
+    expect(built.solarTransmittance).toBeCloseTo(optics.solarTransmittance * ratio, 12);
+    expect(built.solarReflectanceOutside).toBeCloseTo(0.04 + (optics.solarReflectanceInside - 0.04) * ratio ** 2, 12);
+    expect(built.solarReflectanceInside).toBe(optics.solarReflectanceOutside);
+  });
+
   it('never makes light, with any coating on any glass', () => {
     for (const item of catalogue.glasses) {
       for (const { id } of catalogue.coatings) {

@@ -61,6 +61,7 @@ describe('parseLength', () => {
     ['36⅓', /1\/3/],
     ['36 1/128', /64ths/],
     ['36 5/4', /not a fraction below one/],
+    ['36 4/4', /not a fraction below one/],
     ['36.5 1/2', /not both/],
     ['1/0', /64ths/],
     ['4000', /more than 100 m/],
