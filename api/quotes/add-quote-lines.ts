@@ -36,7 +36,7 @@ export function addQuoteLines(
       quote.fabricatorId,
       held,
       dependencies,
-    ).map((line, i) => ({ ...line, id: newId(), quoteId: quote.id, position: kept.length + i }));
+    ).map((line, i) => ({ ...line, id: newId(), quoteId: quote.id, position: kept.length + i + 1 }));
     stores.quotes.addLines(added);
     stores.quotes.change(quote.id, nextState(quote, [...kept, ...added], quote.destination, dependencies));
   });

@@ -42,10 +42,10 @@ export function changeQuoteLines(
     const prices = priceQuoteLines(toPrice, quote.fabricatorId, held, dependencies);
     const priced = new Map(toPrice.map(({ at }, i) => [at, prices[i]]));
 
-    const lines = body.lines.flatMap((line, position): QuoteLineRow[] => {
+    const lines = body.lines.flatMap((line, i): QuoteLineRow[] => {
       const before = had.get(line.id ?? '');
-      const content = priced.get(position) ?? before;
-      return content ? [{ ...content, id: before?.id ?? newId(), quoteId: quote.id, position, tag: line.tag ?? null }] : [];
+      const content = priced.get(i) ?? before;
+      return content ? [{ ...content, id: before?.id ?? newId(), quoteId: quote.id, position: i + 1, tag: line.tag ?? null }] : [];
     });
     stores.quotes.replaceLines(quote.id, lines);
     stores.quotes.change(quote.id, nextState(quote, lines, quote.destination, dependencies));

@@ -63,7 +63,7 @@ export function createQuote(actor: Member, { body }: Pick<Input<typeof createQuo
       updatedAt: now,
       createdBy: actor.personId,
     });
-    stores.quotes.addLines(lines.map((line, position) => ({ ...line, id: newId(), quoteId: id, position })));
+    stores.quotes.addLines(lines.map((line, i) => ({ ...line, id: newId(), quoteId: id, position: i + 1 })));
   });
   return readQuote(actor, { params: { id } }, dependencies);
 }

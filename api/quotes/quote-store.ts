@@ -64,7 +64,7 @@ export function quoteStore(db: Db) {
       return found;
     },
 
-    /** In their order. */
+    /** In their order; positions count from 1. */
     linesOf: (quoteId: string): QuoteLineRow[] => linesOf.all({ quoteId }),
 
     insert: (row: QuoteRow): void => {
