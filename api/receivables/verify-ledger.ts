@@ -92,22 +92,30 @@ function numberAfter(mark: string, column = 'number'): string {
   return `cast(substr(${column}, instr(${column}, '${mark}') + ${mark.length}) as integer)`;
 }
 
+/** Both sides in words, such as `1 to 7, 7 in all`. */
 const gaps = ({ kind, numbers }: { kind: string; numbers: string }) => `
-  select s.company_id as row, s.next - 1 as expected, count(distinct x.n) as found from number_series s left join (${numbers}) x on x.company = s.company_id
-    where s.kind = '${kind}' group by s.company_id having found <> expected or max(x.n) <> expected or min(x.n) <> 1
+  select s.company_id as row, '1 to ' || (s.next - 1) || ', ' || (s.next - 1) || ' in all' as expected,
+      min(x.n) || ' to ' || max(x.n) || ', ' || count(distinct x.n) || ' in all' as found
+    from number_series s left join (${numbers}) x on x.company = s.company_id
+    where s.kind = '${kind}' group by s.company_id having found is not expected
   union all
-  select x.company, 0, max(x.n) from (${numbers}) x where not exists (select 1 from number_series s where s.company_id = x.company and s.kind = '${kind}') group by x.company`;
+  select x.company, 'none', 'up to ' || max(x.n) from (${numbers}) x
+    where not exists (select 1 from number_series s where s.company_id = x.company and s.kind = '${kind}') group by x.company`;
+
+const queries = new Map([
+  ...Object.entries(checks),
+  ...Object.entries(series).map(([what, one]) => [`numbers of ${what} have no gap`, gaps(one)] as const),
+]);
+
+/** What is checked, by name. */
+export const ledgerChecks: readonly string[] = [...queries.keys()];
 
 /**
  * Works out from nothing what every balance, open amount and number series has to be, and
  * compares: of each check the first row that disagrees. Nothing: the books are right.
  */
 export function verifyLedger(db: Db): Disagreement[] {
-  const all = [
-    ...Object.entries(checks),
-    ...Object.entries(series).map(([what, one]) => [`numbers of ${what} have no gap`, gaps(one)] as const),
-  ];
-  return all.flatMap(([check, query]) => {
+  return [...queries].flatMap(([check, query]) => {
     const first = db.get<Omit<Disagreement, 'check'> | undefined>(raw(`select * from (${query}) limit 1`));
     return first ? [{ check, ...first }] : [];
   });
