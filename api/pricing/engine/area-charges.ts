@@ -1,4 +1,4 @@
-import { addCharge, areaAmount, refuse, type UnitInHand } from './unit-in-hand';
+import { addCharge, addRow, areaAmount, refuse, type UnitInHand } from './unit-in-hand';
 import { type Rule } from './compile-list';
 
 /** The charges by area: glass, treatment, coating, assembly and gas. Percentages are taken on them. */
@@ -62,7 +62,7 @@ export function chargeGas(hand: UnitInHand): void {
     const amount = areaAmount(hand, rule);
     const label = rule.labels[only ? 0 : i + 1] ?? '';
     if (rule.minimum && amount.listMinor === rule.minimum.minor) {
-      addCharge(hand, { ...rule, rate: rule.minimum.rate }, `${label}, minimum`, amount, '1', 'cavity');
+      addRow(hand, 'gas', `${label}, minimum`, '1', 'cavity', rule.minimum.rate, amount, rule.id);
     } else {
       addCharge(hand, rule, label, amount, hand.size.areaText, list.measures.areaUnit);
     }

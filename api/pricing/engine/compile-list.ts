@@ -3,6 +3,7 @@ import { type PriceListContent, type PriceListVersion, type UnitFamily } from '@
 import { type Currency, minorDigits } from '@shared/money/currencies';
 import { Exact, exact } from '@shared/money/exact';
 import { compileSizeCharges, type SizeRules } from './compile-size-charges';
+import { compileTiers, type Discounts } from './discounts';
 import { measuresOf, type Measures } from './measures';
 import { indexProducts, type Products } from './index-products';
 
@@ -56,6 +57,7 @@ export interface CompiledList extends SizeRules {
   grids: ReadonlyMap<string, { bars: Rule; crossings: Rule }>;
   edgeWork: ReadonlyMap<string, Rule>;
   extras: readonly ExtraRule[];
+  tiers: ReadonlyMap<string, Discounts>;
   /** the highest threshold first */
   quantityBreaks: readonly QuantityBreak[];
   /** a weight band or a delivery by weight */
@@ -161,6 +163,7 @@ function compile({ version, name, content }: PriceListVersion, catalogue: Catalo
       applies,
       per,
     })),
+    tiers: compileTiers(content),
     ...compileSizeCharges(content, measures, minorPer, version),
     quantityBreaks: content.quantityBreaks
       .map(({ atLeast, percent }) => ({

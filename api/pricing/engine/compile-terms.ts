@@ -1,13 +1,7 @@
-import { type PriceTerms, type Promotion, type UnitFamily, unitFamilies } from '@shared/contracts/price-lists';
-import { Exact, exact } from '@shared/money/exact';
+import { type PriceTerms, type Promotion, type UnitFamily } from '@shared/contracts/price-lists';
+import { type Exact, exact } from '@shared/money/exact';
 import { type CompiledList } from './compile-list';
-
-export interface Discount {
-  percent: string;
-  reason: string | null;
-  /** what is left of the list amount, 0.88 after 12 %; null where nothing comes off */
-  keeps: Exact | null;
-}
+import { type Discounts, discountOf, withoutTier } from './discounts';
 
 /** A promotion that may apply, once its conditions of date, tier and code are met. */
 export interface OpenPromotion {
@@ -21,13 +15,11 @@ export interface OpenPromotion {
 
 /** A dealer's terms at one list on one day. */
 export interface CompiledTerms {
-  discounts: Readonly<Record<UnitFamily, Discount>>;
+  discounts: Discounts;
   /** by make-up */
   netRates: ReadonlyMap<string, { id: string; rate: string; factor: Exact }>;
   promotions: readonly OpenPromotion[];
 }
-
-const nothingOff: Discount = { percent: '0', reason: null, keeps: null };
 
 /**
  * What of the terms holds on the day of the price. Of two contract prices for the same family or
@@ -36,17 +28,16 @@ const nothingOff: Discount = { percent: '0', reason: null, keeps: null };
  */
 export function compileTerms(terms: PriceTerms, list: CompiledList): CompiledTerms {
   const { measures, minorPer } = list;
-  const tier = list.content.tiers.find((entry) => entry.tier === terms.tier);
+  const ofTier = list.tiers.get(terms.tier) ?? withoutTier;
+  if (terms.contracts.length === 0 && terms.promotions.length === 0) return { discounts: ofTier, netRates: new Map(), promotions: [] };
+
+  const discounts = { ...ofTier };
   const inForce = terms.contracts
     .filter(({ from, until }) => from <= terms.on && (until === null || terms.on <= until))
     .sort((a, b) => (a.from < b.from ? -1 : a.from > b.from ? 1 : 0));
-
-  const discounts = Object.fromEntries(
-    unitFamilies.map((family) => [family, tier ? off(tier.percents[family], `tier ${tier.tier}`) : nothingOff]),
-  ) as Record<UnitFamily, Discount>;
   const netRates = new Map<string, { id: string; rate: string; factor: Exact }>();
   for (const contract of inForce) {
-    if (contract.kind === 'percent') discounts[contract.family] = off(contract.percent, 'contract');
+    if (contract.kind === 'percent') discounts[contract.family] = discountOf(contract.percent, 'contract');
     else {
       const factor = exact(contract.rate).times(minorPer).times(measures.perArea);
       netRates.set(contract.makeUp, { id: contract.id, rate: contract.rate, factor });
@@ -57,12 +48,6 @@ export function compileTerms(terms: PriceTerms, list: CompiledList): CompiledTer
     netRates,
     promotions: terms.promotions.filter((offered) => isOpen(offered, terms)).map((offered) => open(offered, list)),
   };
-}
-
-function off(percent: string | undefined, reason: string): Discount {
-  if (percent === undefined) return nothingOff;
-  const taken = exact(percent);
-  return taken.isZero() ? { percent, reason: null, keeps: null } : { percent, reason, keeps: new Exact(100).minus(taken).dividedBy(100) };
 }
 
 function isOpen({ from, until, tiers, code }: Promotion, terms: PriceTerms): boolean {

@@ -2,6 +2,12 @@ import { type PriceListContent } from '@shared/contracts/price-lists';
 import { KG_PER_POUND, MM_PER_INCH } from '@shared/measures/constants';
 import { Exact, exact } from '@shared/money/exact';
 
+/** A divisor with its half, which added before makes a quotient cut to whole one rounded half up. */
+export interface Divisor {
+  by: Exact;
+  half: Exact;
+}
+
 /**
  * How a list measures. A billed area is kept in parts that are exact (in² or mm²) and a rate is
  * scaled to those parts; `areaDivisor` is what remains to divide by, last of all. Dividing area by
@@ -15,8 +21,8 @@ export interface Measures {
   /** what a rate per area is multiplied with to be for one part of area, but for `areaDivisor` */
   perArea: Exact;
   perLength: Exact;
-  areaDivisor: Exact | null;
-  lengthDivisor: Exact | null;
+  areaDivisor: Divisor | null;
+  lengthDivisor: Divisor | null;
   /** parts in a unit of area or length of the list */
   areaParts: Exact;
   lengthParts: Exact;
@@ -45,8 +51,8 @@ export function measuresOf({ measure, billing }: Pick<PriceListContent, 'measure
     kg: exact(imperial ? KG_PER_POUND : '1'),
     perArea: imperial ? one : one.dividedBy(areaParts),
     perLength: imperial ? one : one.dividedBy(lengthParts),
-    areaDivisor: imperial ? areaParts : null,
-    lengthDivisor: imperial ? lengthParts : null,
+    areaDivisor: imperial ? { by: areaParts, half: areaParts.dividedBy(2) } : null,
+    lengthDivisor: imperial ? { by: lengthParts, half: lengthParts.dividedBy(2) } : null,
     areaParts,
     lengthParts,
     sizeUnit: imperial ? 'in' : 'mm',

@@ -3,7 +3,7 @@ import { type Exact, exact } from '@shared/money/exact';
 import { partOf } from './charge';
 import { type CompiledList } from './compile-list';
 import { type BandKind, type BandRule, sizeKey, type SurchargeRule } from './compile-size-charges';
-import { netOf, refuse, type UnitInHand } from './unit-in-hand';
+import { addRow, netOf, refuse, type UnitInHand } from './unit-in-hand';
 
 /** What shape and size add: percentages of the area charges at list, and fixed charges. */
 
@@ -51,30 +51,17 @@ export function chargeSize(hand: UnitInHand, { standard, bands }: SizeFacts): vo
 }
 
 /** One row for the percentage, one for the fixed charge. */
-function addSurcharge({ sheet, list, terms }: UnitInHand, rule: SurchargeRule): void {
-  const discount = terms.discounts[rule.family];
-  const row = { family: rule.family, discountPercent: discount.percent, discountReason: discount.reason, rule: rule.id };
+function addSurcharge(hand: UnitInHand, rule: SurchargeRule): void {
+  const { keeps } = hand.terms.discounts[rule.family];
   if (rule.part) {
-    const listMinor = partOf(sheet.areaMinor, rule.part);
-    sheet.charges.push({
-      ...row,
-      label: rule.percentLabel,
-      quantity: amountOf(sheet.areaMinor, list.currency),
-      unit: list.currency,
-      rate: rule.partText,
-      listMinor,
-      netMinor: netOf(listMinor, discount.keeps),
-    });
+    const { areaMinor } = hand.sheet;
+    const { currency } = hand.list;
+    const listMinor = partOf(areaMinor, rule.part);
+    const amount = { listMinor, netMinor: netOf(listMinor, keeps) };
+    addRow(hand, rule.family, rule.percentLabel, amountOf(areaMinor, currency), currency, rule.partText, amount, rule.id);
   }
   if (rule.fixedMinor > 0) {
-    sheet.charges.push({
-      ...row,
-      label: rule.fixedLabel,
-      quantity: '1',
-      unit: 'unit',
-      rate: rule.fixed,
-      listMinor: rule.fixedMinor,
-      netMinor: netOf(rule.fixedMinor, discount.keeps),
-    });
+    const amount = { listMinor: rule.fixedMinor, netMinor: netOf(rule.fixedMinor, keeps) };
+    addRow(hand, rule.family, rule.fixedLabel, '1', 'unit', rule.fixed, amount, rule.id);
   }
 }

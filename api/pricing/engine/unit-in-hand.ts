@@ -1,10 +1,12 @@
 import { type Reason } from '@shared/contracts/evaluation';
+import { type UnitFamily } from '@shared/contracts/price-lists';
 import { type Unit } from '@shared/contracts/units';
 import { type Exact } from '@shared/money/exact';
 import { type Amount, type BilledSize } from './bill-size';
-import { type Charge, type Sheet, wholeMinor } from './charge';
+import { type Sheet, wholeMinor } from './charge';
 import { type CompiledList, type Rule } from './compile-list';
 import { type CompiledTerms } from './compile-terms';
+import { type Divisor } from './measures';
 
 /** A unit while its charges are made. */
 export interface UnitInHand {
@@ -33,7 +35,7 @@ export function perimeterAmount(hand: UnitInHand, rule: Rule): Amount {
   return amountOf(hand, rule, hand.size.perimeterParts, hand.list.measures.lengthDivisor);
 }
 
-function amountOf({ size, terms }: UnitInHand, rule: Rule, parts: Exact, divisor: Exact | null): Amount {
+function amountOf({ size, terms }: UnitInHand, rule: Rule, parts: Exact, divisor: Divisor | null): Amount {
   const made = size.amounts.get(rule);
   if (made) return made;
   const rated = wholeQuotient(parts.times(rule.factor), divisor);
@@ -43,27 +45,32 @@ function amountOf({ size, terms }: UnitInHand, rule: Rule, parts: Exact, divisor
   return amount;
 }
 
-/** A positive amount divided and rounded half up in one step, so that no cut quotient is rounded. */
-export function wholeQuotient(amount: Exact, divisor: Exact | null): number {
-  return wholeMinor(divisor === null ? amount : amount.dividedBy(divisor));
+/** A positive amount divided and rounded half up in one step, so that no cut quotient is ever rounded. */
+export function wholeQuotient(amount: Exact, divisor: Divisor | null): number {
+  if (divisor === null) return wholeMinor(amount);
+  const whole = amount.plus(divisor.half).dividedToIntegerBy(divisor.by).toNumber();
+  if (!Number.isSafeInteger(whole)) throw new RangeError(`${amount.toString()} minor units are too many`);
+  return whole;
+}
+
+/** Writes the row of a rate. */
+export function addCharge(hand: UnitInHand, rule: Rule, label: string, amount: Amount, quantity: string, unit: string): void {
+  addRow(hand, rule.family, label, quantity, unit, rule.rate, amount, rule.id);
 }
 
 /** Writes one row of a unit family. */
-export function addCharge({ sheet, terms }: UnitInHand, rule: Rule, label: string, amount: Amount, quantity: string, unit: string): void {
-  const discount = terms.discounts[rule.family];
-  const charge: Charge = {
-    family: rule.family,
-    label,
-    quantity,
-    unit,
-    rate: rule.rate,
-    listMinor: amount.listMinor,
-    discountPercent: discount.percent,
-    discountReason: discount.reason,
-    netMinor: amount.netMinor,
-    rule: rule.id,
-  };
-  sheet.charges.push(charge);
+export function addRow(
+  { sheet, terms }: UnitInHand,
+  family: UnitFamily,
+  label: string,
+  quantity: string,
+  unit: string,
+  rate: string,
+  { listMinor, netMinor }: Amount,
+  rule: string,
+): void {
+  const { percent, reason } = terms.discounts[family];
+  sheet.charges.push({ family, label, quantity, unit, rate, listMinor, discountPercent: percent, discountReason: reason, netMinor, rule });
 }
 
 /** Refuses a product that the list has no rate for: a list never prices at nothing. */
