@@ -3,13 +3,16 @@ import { createServer, type Server } from 'node:http';
 import { dirname, join } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { AngularNodeAppEngine, createNodeRequestHandler, isMainModule, writeResponseToNodeResponse } from '@angular/ssr/node';
-import express, { type Express } from 'express';
+import { type Express } from 'express';
 import { createApi, routes } from '@api/api';
+import { sitemapRoutes } from '@api/catalogue/sitemap-routes';
 import { readConfig, WrongConfiguration } from '@api/config';
 import { NewerDatabase } from '@api/database/open-database';
 import { createDependencies, type Dependencies } from '@api/dependencies';
 import { cachedPages } from '@api/http/cached-pages';
 import { createInProcess } from '@api/http/in-process';
+import { staticFiles } from '@api/http/static-files';
+import { mailboxRoutes } from '@api/local/mailbox-routes';
 import { startBackground } from '@api/local/start-background';
 import { prepareMarket } from '@seeds/prepare-market';
 
@@ -32,22 +35,24 @@ const PUBLIC_PAGE = /^\/($|catalogue(\/|$)|bench$)/;
 export function createApplication(dependencies: Dependencies): Express {
   const { config, catalogue } = dependencies;
   const engine = new AngularNodeAppEngine({ allowedHosts: config.allowedHosts });
-  const api = createInProcess(routes, dependencies);
+  const context = { api: createInProcess(routes, dependencies), publicUrl: config.publicUrl };
   const app = createApi(dependencies);
 
+  if (config.mail.kind === 'local') app.use(mailboxRoutes(config));
+  app.use(sitemapRoutes(dependencies));
   app.use(
     cachedPages(
       (path) => PUBLIC_PAGE.test(path),
       () => catalogue.version(),
       async (request) => {
-        const rendered = await engine.handle(request, { api });
+        const rendered = await engine.handle(request, context);
         return rendered?.status === 200 ? rendered.text() : null;
       },
     ),
   );
-  app.use(express.static(join(here, '../browser'), { maxAge: '1y', immutable: true, index: false, redirect: false }));
+  app.use(staticFiles(join(here, '../browser')));
   app.use(async (request, response, next) => {
-    const rendered = await engine.handle(request, { api });
+    const rendered = await engine.handle(request, context);
     return rendered ? writeResponseToNodeResponse(rendered, response) : next();
   });
   return app;
@@ -64,7 +69,7 @@ async function compose(): Promise<{ app: Express; dependencies: Dependencies }> 
 let composed: ReturnType<typeof composeForDevelopment> | undefined;
 async function composeForDevelopment() {
   const parts = await compose();
-  await startBackground(parts.dependencies, parts.app);
+  await startBackground(parts.dependencies);
   return parts;
 }
 export const reqHandler = createNodeRequestHandler(async (request, response, next) => {
@@ -96,7 +101,7 @@ function stopCleanly(server: Server, dependencies: Dependencies, background: { s
 async function main(): Promise<void> {
   const { app, dependencies } = await compose();
   const { config } = dependencies;
-  const background = await startBackground(dependencies, app);
+  const background = await startBackground(dependencies);
   const server = createServer({ requestTimeout: 30_000, headersTimeout: 10_000, keepAliveTimeout: 5000 }, app);
   server.on('error', (error: NodeJS.ErrnoException) => {
     console.error(error.code === 'EADDRINUSE' ? `Port ${config.port} is taken. Set PORT to another one.` : error.message);
