@@ -3,8 +3,8 @@ import { type Dependencies } from '../dependencies';
 import { type MailSender } from './mail-sender';
 import { type OutboxMail } from './outbox-store';
 
-/** Makes the document to attach, as PDF. @throws Error when there is no such document */
-export type RenderAttachment = (attachment: MailAttachment) => Promise<Uint8Array>;
+/** Makes the document to attach, as PDF, as the company that sends it has it. @throws Error when it has no such document */
+export type RenderAttachment = (attachment: MailAttachment, companyId: string) => Promise<Uint8Array>;
 
 const FIRST_DELAY_MS = 60_000;
 const LONGEST_DELAY_MS = 6 * 60 * 60_000;
@@ -53,7 +53,7 @@ export async function sendDueMails(
 async function complete(mail: OutboxMail, renderAttachment: RenderAttachment) {
   const attachments = [];
   for (const attachment of mail.attachments) {
-    attachments.push({ fileName: attachment.fileName, contentType: 'application/pdf', bytes: await renderAttachment(attachment) });
+    attachments.push({ fileName: attachment.fileName, contentType: 'application/pdf', bytes: await renderAttachment(attachment, mail.companyId) });
   }
   const { messageId, fromName, replyTo, to, subject, body } = mail;
   return { messageId, fromName, replyTo, to, subject, body, writtenAt: new Date(mail.createdAt), attachments };
