@@ -23,6 +23,7 @@ export function orderStore(db: Db) {
       id: companies.id,
       name: companies.name,
       timeZone: companies.timeZone,
+      locale: companies.locale,
       measureSystem: companies.measureSystem,
       letterhead: companies.letterhead,
       numberPrefix: fabricators.numberPrefix,
@@ -122,6 +123,9 @@ export function orderStore(db: Db) {
     copyLinesOfQuote: (orderId: string, quoteId: string) => copyLines.run({ orderId, quoteId }),
 
     recordMove: (row: MoveRow) => recordMove.run({ ...row }),
+
+    /** An order, whoever's, with the names that stand on it: for documents, whose reader has been checked. */
+    find: (id: string) => read.get({ id }),
 
     /** An order that the company is a party of, with the names that stand on it. */
     read: (companyId: string, id: string) => {

@@ -16,7 +16,7 @@ export function readInvoice(
   { stores, clock }: Pick<Dependencies, 'stores' | 'clock'>,
 ): AnswerOf<typeof readInvoiceEndpoint> {
   const isDealer = actor.companyKind === 'dealer';
-  const found = stores.invoices.read(isDealer ? 'dealer' : 'fabricator', actor.companyId, params.id);
+  const found = stores.invoices.read(actor.companyId, params.id);
   if (!found) throw new Refusal('not-found', 'There is no such invoice of yours.');
   const { invoice } = found;
   const amount = (minor: number) => money(minor, invoice.currency);

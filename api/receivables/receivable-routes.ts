@@ -1,5 +1,6 @@
 import {
   applyReceipt as applyReceiptEndpoint,
+  invoicePdf as invoicePdfEndpoint,
   listInvoices as listInvoicesEndpoint,
   listReceipts as listReceiptsEndpoint,
   readInvoice as readInvoiceEndpoint,
@@ -17,6 +18,7 @@ import {
 import { type Route, serve } from '../http/serve';
 import { applyReceipt } from './apply-receipt';
 import { changeCredit } from './change-credit';
+import { invoicePdf } from './invoice-document';
 import { listInvoices } from './list-invoices';
 import { listMovements } from './list-movements';
 import { readCredit } from './read-credit';
@@ -33,6 +35,7 @@ export const receivableRoutes: Route[] = [
   serve(changeCreditEndpoint, changeCredit),
   serve(listInvoicesEndpoint, listInvoices),
   serve(readInvoiceEndpoint, readInvoice),
+  serve(invoicePdfEndpoint, invoicePdf),
   serve(recordReceiptEndpoint, recordReceipt),
   serve(listReceiptsEndpoint, listReceipts),
   serve(readReceiptEndpoint, readReceipt),
