@@ -15,6 +15,7 @@ import { MatButton, MatIconButton } from '@angular/material/button';
 import { MatTableModule } from '@angular/material/table';
 import { RouterLink } from '@angular/router';
 import { quantity as quantitySchema } from '@shared/contracts/primitives';
+import { type Hint } from '@shared/contracts/prices';
 import { type Quote, type QuoteLine } from '@shared/contracts/quotes';
 import { lengthForEditing } from '@shared/measures/format-length';
 import { parseLength } from '@shared/measures/parse-length';
@@ -83,6 +84,8 @@ export class QuoteLines {
   protected readonly canEdit = computed(() => this.quote().state === 'open');
   protected readonly hasRetail = computed(() => /[1-9]/.test(this.quote().markUpPercent));
   protected readonly rows = computed(() => this.quote().lines.map((line, i, { length }) => this.toRow(line, i, length)));
+  /** The Bench takes up this quote for its next lines. */
+  protected readonly onBench = computed(() => ({ quote: this.quote().id, maker: this.quote().fabricator.id }));
   protected readonly byId = (_: number, { line }: Row) => line.id;
   protected readonly isOpen = (_: number, { line }: Row) => line.id === this.opened();
 
@@ -92,6 +95,11 @@ export class QuoteLines {
 
   protected async copy({ line, name }: Row): Promise<void> {
     await this.run(this.desk.editLines(copyLine(line.id)), `${name} copied`);
+  }
+
+  protected async resize({ line, name }: Row, { width, height }: Hint): Promise<void> {
+    const unit = { ...this.now(line).unit, width, height };
+    await this.run(this.desk.editLines(changeLine(line.id, { unit })), `${name} has another size`);
   }
 
   protected async move({ line, name }: Row, by: -1 | 1, button?: Event): Promise<void> {
