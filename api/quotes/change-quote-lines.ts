@@ -15,8 +15,7 @@ type Asked = Input<typeof changeQuoteLinesEndpoint>['body']['lines'];
 /**
  * Puts the whole list of lines in its new order. A line that names its id and is the same in
  * unit, quantity and extras keeps its sheet to the letter; any other is priced with the version
- * and terms that the quote holds. A line put back may name the id it had: it is priced like a
- * new one, which under the same version and terms is the price it had.
+ * and terms that the quote holds; so is a line put back, which gives the price it had.
  *
  * @throws Refusal `not-found`, `not-in-this-state` once ordered, `changed-meanwhile`, `quote-expired` when a
  *   line needs a price, `cannot-build`, or `invalid` at the field
@@ -31,9 +30,9 @@ export function changeQuoteLines(
     const quote = findQuote(actor, params.id, stores);
     demandNotOrdered(quote);
     demandRevision(quote, body.revision);
-    demandDistinct(body.lines);
-
     const had = new Map(stores.quotes.linesOf(quote.id).map((line) => [line.id, line]));
+    demandOwnLines(body.lines, had);
+
     const toPrice: LineAsked[] = body.lines
       .map((line, at) => ({ ...line, at }))
       .filter((line) => !isUnchanged(line, had.get(line.id ?? '')));
@@ -58,13 +57,14 @@ function isUnchanged(asked: Asked[number], kept: QuoteLineRow | undefined): bool
   return asked.quantity === kept.quantity && isDeepStrictEqual(asked.unit, kept.unit) && isDeepStrictEqual(asked.extras ?? [], kept.extras);
 }
 
-function demandDistinct(lines: Asked): void {
+/** Each id names one line of the quote, once. */
+function demandOwnLines(lines: Asked, had: ReadonlyMap<string, QuoteLineRow>): void {
   const seen = new Set<string>();
   const errors = lines.flatMap(({ id }, i) => {
     if (id === undefined) return [];
-    if (seen.has(id)) return [{ pointer: pointer('lines', i, 'id'), detail: 'is named twice; leave it out for a copy' }];
+    const fault = seen.has(id) ? 'is named twice; leave it out for a copy' : had.has(id) ? null : 'is not a line of this quote';
     seen.add(id);
-    return [];
+    return fault === null ? [] : [{ pointer: pointer('lines', i, 'id'), detail: fault }];
   });
   if (errors.length > 0) throw new Refusal('invalid', `${errors[0]?.pointer}: ${errors[0]?.detail}`, errors);
 }

@@ -7,6 +7,7 @@ import { createQuote } from './create-quote';
 import { listQuotes } from './list-quotes';
 import { mailQuote } from './mail-quote';
 import { previewRePrice } from './preview-re-price';
+import { quotePdf } from './quote-pdf';
 import { rePriceQuote } from './re-price-quote';
 import { readQuote } from './read-quote';
 
@@ -19,5 +20,6 @@ export const quoteRoutes: Route[] = [
   serve(quotes.changeQuoteLines, changeQuoteLines),
   serve(quotes.previewRePrice, previewRePrice),
   serve(quotes.rePriceQuote, rePriceQuote),
+  serve(quotes.quotePdf, quotePdf),
   serve(quotes.mailQuote, mailQuote),
 ];

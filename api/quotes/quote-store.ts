@@ -25,7 +25,7 @@ export interface QuoteFilter {
   tradeAccountId?: string;
 }
 
-/** Rows of quotes and their lines. A quote belongs to one dealer, and every look-up names it. */
+/** Rows of quotes and their lines. A quote belongs to one dealer, and every look-up for a reader names it. */
 export function quoteStore(db: Db) {
   const names = {
     fabricatorName: companies.name,
@@ -53,9 +53,20 @@ export function quoteStore(db: Db) {
     .where(eq(quoteLines.quoteId, sql.placeholder('quoteId')))
     .orderBy(asc(quoteLines.position))
     .prepare();
+  // Hundreds of lines at once: the statement is built for the first only.
+  const insertLine = db
+    .insert(quoteLines)
+    .values(Object.fromEntries(Object.keys(getTableColumns(quoteLines)).map((name) => [name, sql.placeholder(name)])) as never)
+    .prepare();
+  const addLines = (rows: readonly QuoteLineRow[]): void => {
+    for (const row of rows) insertLine.run({ ...row });
+  };
 
   return {
     find: (dealerId: string, id: string): QuoteRow | undefined => find.get({ dealerId, id }),
+
+    /** A quote, whoever's: for a mail that its dealer has sent. */
+    toMail: (id: string): QuoteRow | undefined => db.select().from(quotes).where(eq(quotes.id, id)).get(),
 
     /** Names around a quote that exists. @throws Error when it does not */
     namesOf: (id: string): QuoteNames => {
@@ -75,14 +86,12 @@ export function quoteStore(db: Db) {
       db.update(quotes).set(change).where(eq(quotes.id, id)).run();
     },
 
-    addLines: (rows: readonly QuoteLineRow[]): void => {
-      for (const row of rows) db.insert(quoteLines).values(row).run();
-    },
+    addLines,
 
     /** Puts `rows` in the place of all lines of a quote. */
     replaceLines: (quoteId: string, rows: readonly QuoteLineRow[]): void => {
       db.delete(quoteLines).where(eq(quoteLines.quoteId, quoteId)).run();
-      for (const row of rows) db.insert(quoteLines).values(row).run();
+      addLines(rows);
     },
 
     /** Up to `limit` quotes of a dealer, newest first, after (created at, id). */

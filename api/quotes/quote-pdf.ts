@@ -1,0 +1,28 @@
+import { type quotePdf as quotePdfEndpoint } from '@shared/contracts/quotes';
+import { type Member } from '../companies/actor';
+import { type Dependencies } from '../dependencies';
+import { renderQuotePdf } from '../documents/render-quote-pdf';
+import { type FileAnswer, type Input } from '../http/serve';
+import { quoteDocument } from './quote-document';
+import { findQuote } from './quote-life';
+
+/** A quote of the caller's own company as PDF, wholesale or retail. @throws Refusal `not-found` */
+export async function quotePdf(
+  actor: Member,
+  { params, query }: Pick<Input<typeof quotePdfEndpoint>, 'params' | 'query'>,
+  dependencies: Pick<Dependencies, 'stores' | 'catalogue'>,
+): Promise<FileAnswer> {
+  const quote = findQuote(actor, params.id, dependencies.stores);
+  return { fileName: `${quote.number}.pdf`, bytes: await renderQuotePdf(quoteDocument(quote, query.prices, dependencies)) };
+}
+
+/** The quote to attach to a mail that its dealer sent. @throws Error when there is no such quote */
+export async function quoteAttachment(
+  quoteId: string,
+  prices: 'wholesale' | 'retail',
+  dependencies: Pick<Dependencies, 'stores' | 'catalogue'>,
+): Promise<Uint8Array> {
+  const quote = dependencies.stores.quotes.toMail(quoteId);
+  if (!quote) throw new Error(`no quote ${quoteId}`);
+  return renderQuotePdf(quoteDocument(quote, prices, dependencies));
+}
