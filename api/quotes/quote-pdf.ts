@@ -15,14 +15,3 @@ export async function quotePdf(
   const quote = findQuote(actor, params.id, dependencies.stores);
   return { fileName: `${quote.number}.pdf`, bytes: await renderQuotePdf(quoteDocument(quote, query.prices, dependencies)) };
 }
-
-/** The quote to attach to a mail that its dealer sent. @throws Error when there is no such quote */
-export async function quoteAttachment(
-  quoteId: string,
-  prices: 'wholesale' | 'retail',
-  dependencies: Pick<Dependencies, 'stores' | 'catalogue'>,
-): Promise<Uint8Array> {
-  const quote = dependencies.stores.quotes.toMail(quoteId);
-  if (!quote) throw new Error(`no quote ${quoteId}`);
-  return renderQuotePdf(quoteDocument(quote, prices, dependencies));
-}

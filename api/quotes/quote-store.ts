@@ -25,7 +25,7 @@ export interface QuoteFilter {
   tradeAccountId?: string;
 }
 
-/** Rows of quotes and their lines. A quote belongs to one dealer, and every look-up for a reader names it. */
+/** Rows of quotes and their lines. A quote belongs to one dealer, and every look-up names it. */
 export function quoteStore(db: Db) {
   const names = {
     fabricatorName: companies.name,
@@ -64,9 +64,6 @@ export function quoteStore(db: Db) {
 
   return {
     find: (dealerId: string, id: string): QuoteRow | undefined => find.get({ dealerId, id }),
-
-    /** A quote, whoever's: for a mail that its dealer has sent. */
-    toMail: (id: string): QuoteRow | undefined => db.select().from(quotes).where(eq(quotes.id, id)).get(),
 
     /** Names around a quote that exists. @throws Error when it does not */
     namesOf: (id: string): QuoteNames => {
