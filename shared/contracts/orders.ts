@@ -111,7 +111,7 @@ export const listOrders = endpoint({
   id: 'orders.list',
   method: 'GET',
   path: '/api/orders',
-  summary: 'Orders of one’s own company, newest first; q is the beginning of the order number or PO number',
+  summary: 'Orders of one’s own company, newest first; with q, those whose number, then those whose PO number begins with it, last first',
   query: pageQuery.extend({ state: orderState.optional(), q: z.string().max(60).optional(), dealer: id.optional() }),
   status: 200,
   answer: pageOf(orderItem),
