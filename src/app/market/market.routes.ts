@@ -1,3 +1,3 @@
 import { type Routes } from '@angular/router';
 
-export const marketRoutes: Routes = [];
+export const marketRoutes: Routes = [{ path: '', title: 'Market', loadComponent: async () => (await import('./market-page')).MarketPage }];
