@@ -1,4 +1,5 @@
 import { type Exact, exact } from '@shared/money/exact';
+import { decimalText } from './charge';
 import { type CompiledList, type Rule } from './compile-list';
 
 /** List and net amount of one rate at one billed size, minor units. */
@@ -42,8 +43,8 @@ export function billSteps(widthSteps: number, heightSteps: number, { measures }:
     height,
     areaParts,
     perimeterParts,
-    areaText: areaParts.dividedBy(measures.areaParts).toString(),
-    perimeterText: perimeterParts.dividedBy(measures.lengthParts).toString(),
+    areaText: decimalText(areaParts.dividedBy(measures.areaParts)),
+    perimeterText: decimalText(perimeterParts.dividedBy(measures.lengthParts)),
     amounts: new Map(),
   };
 }

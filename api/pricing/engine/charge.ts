@@ -5,7 +5,7 @@ import { type Exact } from '@shared/money/exact';
 /**
  * One row of a charge sheet in minor units. For a row of a unit family `quantity` × `rate`,
  * rounded, is the list amount; for a net rate, quantity break or promotion it is the net amount,
- * for these come after the list. Both are unrounded decimal strings; of a percentage the quantity
+ * for these come after the list. Both are unrounded decimal strings (see `decimalText`); of a percentage the quantity
  * is an amount of money and the rate a fraction (`0.06`).
  */
 export interface Charge {
@@ -29,6 +29,11 @@ export interface Sheet {
   refusals: Reason[];
   /** list amounts of glass, treatment, coating, assembly and gas, on which percentages are taken */
   areaMinor: number;
+}
+
+/** A decimal string for a sheet; a quotient that does not end is cut after 20 decimals, as many as `exact` reads. */
+export function decimalText(value: Exact): string {
+  return value.toDecimalPlaces(20).toString();
 }
 
 /** A half cent is rounded up, away from zero: the only place where an exact amount in minor units becomes whole. */

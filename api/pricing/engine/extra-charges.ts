@@ -1,5 +1,5 @@
 import { Exact } from '@shared/money/exact';
-import { wholeMinor } from './charge';
+import { decimalText, wholeMinor } from './charge';
 import { type ExtraRule } from './compile-list';
 import { addCharge, netOf, refuse, type UnitInHand } from './unit-in-hand';
 
@@ -35,6 +35,6 @@ function addExtra(hand: UnitInHand, rule: ExtraRule, counted: number, what: stri
   const [times, unit] = rule.per === 'cavity' ? [new Exact(counted), what] : rule.per === 'unit' ? [new Exact(1), 'unit'] : [null, 'line'];
   const listMinor = wholeMinor(times ? rule.factor.times(times) : rule.factor.dividedBy(hand.quantity));
   const netMinor = netOf(listMinor, hand.terms.discounts.extras.keeps);
-  const quantity = (times ?? new Exact(1).dividedBy(hand.quantity)).toString();
+  const quantity = decimalText(times ?? new Exact(1).dividedBy(hand.quantity));
   addCharge(hand, rule, rule.labels[0] ?? '', { listMinor, netMinor }, quantity, unit);
 }

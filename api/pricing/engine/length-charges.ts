@@ -1,6 +1,6 @@
 import { addCharge, netOf, perimeterAmount, refuse, type UnitInHand, wholeQuotient } from './unit-in-hand';
 import { type Rule } from './compile-list';
-import { wholeMinor } from './charge';
+import { decimalText, wholeMinor } from './charge';
 
 /** The charges by length: spacers, grids and edge work. */
 
@@ -25,7 +25,7 @@ export function chargeGrid(hand: UnitInHand): void {
   const { lengthDivisor, lengthParts, lengthUnit } = list.measures;
   const parts = size.height.times(across).plus(size.width.times(down));
   const bars = wholeQuotient(parts.times(rules.bars.factor), lengthDivisor);
-  addGridCharge(hand, rules.bars, bars, parts.dividedBy(lengthParts).toString(), lengthUnit);
+  addGridCharge(hand, rules.bars, bars, decimalText(parts.dividedBy(lengthParts)), lengthUnit);
   const crossings = across * down;
   if (crossings > 0)
     addGridCharge(hand, rules.crossings, wholeMinor(rules.crossings.factor.times(crossings)), String(crossings), 'crossing');

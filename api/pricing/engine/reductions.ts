@@ -1,7 +1,7 @@
 import { type RowFamily, areaFamilies, type UnitFamily } from '@shared/contracts/price-lists';
 import { Exact } from '@shared/money/exact';
 import { amountOf } from '@shared/money/money';
-import { type Charge, partOf, wholeMinor } from './charge';
+import { type Charge, decimalText, partOf, wholeMinor } from './charge';
 import { type CompiledList, type QuantityBreak } from './compile-list';
 import { type CompiledTerms, type OpenPromotion } from './compile-terms';
 import { type UnitInHand, wholeQuotient } from './unit-in-hand';
@@ -86,7 +86,7 @@ function rowOf(
     taken = taken.plus(share.times(part));
   }
   if (base.isZero()) return undefined;
-  const quantity = base.dividedBy(list.minorPer).toString();
+  const quantity = decimalText(base.dividedBy(list.minorPer));
   return reduction('promotion', label, quantity, list, taken.dividedBy(base), -wholeMinor(taken), id);
 }
 
@@ -104,7 +104,7 @@ function reduction(
     label,
     quantity,
     unit: currency,
-    rate: part.negated().toString(),
+    rate: decimalText(part.negated()),
     listMinor: 0,
     discountPercent: '0',
     discountReason: null,
