@@ -1,0 +1,38 @@
+import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
+import { Icon } from '../ui/icon';
+import { type NobodyNote } from './nobody-builds';
+import { detailsOf } from './reason-words';
+import { TakeNearest } from './take-nearest';
+
+/** Beside a field: why nobody can build what it holds, and the nearest that one maker can. */
+@Component({
+  selector: 'app-field-note',
+  imports: [Icon, TakeNearest],
+  changeDetection: ChangeDetectionStrategy.OnPush,
+  template: `
+    @if (note(); as nobody) {
+      <p>
+        <app-icon name="warning" /> No maker can build this. {{ nobody.maker }} comes nearest: {{ details() }}.
+        <app-take-nearest [reasons]="nobody.reasons" />
+      </p>
+    }
+  `,
+  styles: `
+    :host {
+      display: block;
+    }
+    :host:empty {
+      display: none;
+    }
+    p {
+      margin-top: -6px;
+      padding: 0 2px;
+      color: var(--sy-error);
+      font-size: 13px;
+    }
+  `,
+})
+export class FieldNote {
+  readonly note = input.required<NobodyNote | null>();
+  protected readonly details = computed(() => detailsOf(this.note()?.reasons ?? []).join('; '));
+}

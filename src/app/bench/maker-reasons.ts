@@ -1,0 +1,35 @@
+import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
+import { type Reason } from '@shared/contracts/evaluation';
+import { detailsOf } from './reason-words';
+import { TakeNearest } from './take-nearest';
+
+/** Why one maker cannot build the unit, and the nearest that it can. */
+@Component({
+  selector: 'app-maker-reasons',
+  imports: [TakeNearest],
+  changeDetection: ChangeDetectionStrategy.OnPush,
+  template: `
+    <ul>
+      @for (detail of details(); track detail) {
+        <li>{{ detail }}</li>
+      }
+    </ul>
+    <app-take-nearest [reasons]="reasons()" />
+  `,
+  styles: `
+    :host {
+      display: block;
+      font-size: 13.5px;
+    }
+    ul {
+      margin: 2px 0 0;
+      padding: 0;
+      list-style: none;
+      color: var(--sy-soft);
+    }
+  `,
+})
+export class MakerReasons {
+  readonly reasons = input.required<readonly Reason[]>();
+  protected readonly details = computed(() => detailsOf(this.reasons()));
+}

@@ -1,0 +1,29 @@
+import { computed, inject, Injectable } from '@angular/core';
+import { type Reason } from '@shared/contracts/evaluation';
+import { UnitDraft } from './unit-draft';
+
+/** The maker that comes nearest, and what of one field it refuses. */
+export interface NobodyNote {
+  maker: string;
+  reasons: readonly Reason[];
+}
+
+/**
+ * Why nobody can build the unit, by the field that causes it: the reasons of the maker that comes
+ * nearest. Empty as long as anybody can.
+ */
+@Injectable()
+export class NobodyBuilds {
+  private readonly draft = inject(UnitDraft);
+  readonly nearest = computed(() => {
+    const { buildability } = this.draft.evaluation();
+    if (buildability.length === 0 || this.draft.behind() || buildability.some(({ canBuild }) => canBuild)) return null;
+    return buildability.reduce((best, maker) => (maker.reasons.length < best.reasons.length ? maker : best));
+  });
+
+  at(pointer: string): NobodyNote | null {
+    const nearest = this.nearest();
+    const reasons = nearest?.reasons.filter((reason) => reason.pointer === pointer || reason.pointer.startsWith(`${pointer}/`)) ?? [];
+    return nearest && reasons.length > 0 ? { maker: nearest.fabricator.name, reasons } : null;
+  }
+}

@@ -1,0 +1,124 @@
+import {
+  ChangeDetectionStrategy,
+  Component,
+  computed,
+  DestroyRef,
+  effect,
+  type ElementRef,
+  inject,
+  input,
+  output,
+  signal,
+  viewChild,
+} from '@angular/core';
+import { FormControl, ReactiveFormsModule } from '@angular/forms';
+import { MatFormFieldModule } from '@angular/material/form-field';
+import { MatInput } from '@angular/material/input';
+
+/** A pause after which unfinished text is taken for a mistake, ms. */
+const PAUSE = 900;
+
+/** A line of text, kept as it is typed, with the message about it below once one pauses or leaves. */
+@Component({
+  selector: 'app-text-field',
+  imports: [ReactiveFormsModule, MatFormFieldModule, MatInput],
+  changeDetection: ChangeDetectionStrategy.OnPush,
+  template: `
+    <mat-form-field appearance="outline" subscriptSizing="dynamic">
+      <mat-label>{{ label() }}</mat-label>
+      <input
+        #field
+        matInput
+        type="text"
+        autocomplete="off"
+        spellcheck="false"
+        [maxlength]="longest()"
+        [formControl]="control"
+        [errorStateMatcher]="matcher"
+        [attr.inputmode]="keys()"
+        [attr.enterkeyhint]="enterKeyHint()"
+        (input)="type()"
+        (blur)="leave()"
+        (keydown.enter)="enter($event)"
+      />
+      @if (suffix(); as words) {
+        <span matTextSuffix class="beside">{{ words }}</span>
+      }
+      @if (shown(); as words) {
+        <mat-error>{{ words }}</mat-error>
+      } @else if (hint()) {
+        <mat-hint>{{ hint() }}</mat-hint>
+      }
+    </mat-form-field>
+  `,
+  styles: `
+    :host {
+      display: block;
+      min-width: 0;
+    }
+    mat-form-field {
+      width: 100%;
+    }
+    .beside {
+      padding-left: 8px;
+      color: var(--sy-soft);
+      font-size: 13px;
+      white-space: nowrap;
+    }
+    mat-error,
+    mat-hint {
+      padding-bottom: 2px;
+      font-size: 13px;
+    }
+  `,
+})
+export class TextField {
+  readonly label = input.required<string>();
+  readonly text = input.required<string>();
+  readonly problem = input<string | null>(null);
+  readonly hint = input('');
+  readonly suffix = input('');
+  readonly keys = input<'numeric' | 'decimal' | null>(null);
+  readonly longest = input(80);
+  readonly enterKeyHint = input<string | null>(null);
+  readonly typed = output<string>();
+  readonly left = output();
+  readonly entered = output();
+
+  private readonly field = viewChild.required<ElementRef<HTMLInputElement>>('field');
+  protected readonly control = new FormControl('', { nonNullable: true });
+  private readonly settled = signal(true);
+  private pause: ReturnType<typeof setTimeout> | undefined;
+  protected readonly shown = computed(() => (this.settled() ? this.problem() : null));
+  protected readonly matcher = { isErrorState: () => this.shown() !== null };
+
+  constructor() {
+    effect(() => {
+      const text = this.text();
+      if (this.control.value !== text) this.control.setValue(text);
+    });
+    inject(DestroyRef).onDestroy(() => clearTimeout(this.pause));
+  }
+
+  focus(): void {
+    this.field().nativeElement.focus();
+    this.field().nativeElement.select();
+  }
+
+  protected type(): void {
+    this.settled.set(false);
+    clearTimeout(this.pause);
+    this.pause = setTimeout(() => this.settled.set(true), PAUSE);
+    this.typed.emit(this.control.value);
+  }
+
+  protected leave(): void {
+    this.settled.set(true);
+    this.left.emit();
+  }
+
+  protected enter(event: Event): void {
+    event.preventDefault();
+    if (!(event as KeyboardEvent).repeat) this.entered.emit();
+  }
+}
