@@ -4,7 +4,7 @@ import type { Place } from '../contracts/units';
 /** Inside surface resistance used for the surface temperature, m²K/W. */
 const insideResistance = 0.13;
 /** The winter day taken when the place names none, °C. */
-const usual = { inside: 20, outside: -10 };
+export const usual = { inside: 20, outside: -10 };
 
 /** Saturation pressure of water vapour at θ °C, Pa: ISO 13788 (from memory). */
 export function saturationPressure(celsius: number): number {
