@@ -78,4 +78,4 @@ export const badUnits: [what: string, unit: unknown, pointer: string][] = [
 ];
 
 /** Quantities that are none. */
-export const badQuantities: unknown[] = [0, -1, 1.5, 10_000_000, '3', null, 1e400];
+export const badQuantities: unknown[] = [0, -1, 1.5, 10_000_000, '3', null];
