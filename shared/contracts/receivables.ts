@@ -73,7 +73,8 @@ export const listInvoices = endpoint({
   id: 'invoices.list',
   method: 'GET',
   path: '/api/invoices',
-  summary: 'Invoices of one’s own company: open ones by the earliest due day, others by the latest; q is the beginning of number or reference',
+  summary:
+    'Invoices of one’s own company: open ones by the earliest due day, others by the latest; q is the beginning of number or reference',
   query: pageQuery.extend({ state: z.enum(['open', 'paid']).optional(), q: z.string().max(60).optional(), tradeAccount: id.optional() }),
   status: 200,
   answer: pageOf(invoiceItem),

@@ -5,7 +5,7 @@ import request from 'supertest';
 import { createApi } from '@api/api';
 import { hashPassword } from '@api/companies/passwords';
 import { readConfig } from '@api/config';
-import { openDatabase } from '@api/database/open-database';
+import { type Database, openDatabase } from '@api/database/open-database';
 import { createDependencies, type Dependencies } from '@api/dependencies';
 import { DEMO_PASSWORD, loadCompanies } from '@seeds/demo/load-companies';
 import { loadPriceLists } from '@seeds/demo/load-price-lists';
@@ -54,13 +54,16 @@ export const MARKET_DAY = Date.UTC(2026, 8, 15, 15);
 
 let passwordHash: Promise<string> | undefined;
 
-export async function marketFactory(environment: Record<string, string> = {}): Promise<Market> {
+export async function marketFactory(
+  environment: Record<string, string> = {},
+  database: Database = openDatabase(':memory:', MIGRATIONS),
+): Promise<Market> {
   const clock = { now: MARKET_DAY };
   const config = readConfig({ NODE_ENV: 'test', LOG_LEVEL: 'silent', ...environment });
   const dependencies = createDependencies(config, MIGRATIONS, {
     clock: () => clock.now,
     log: pino({ level: config.logLevel }),
-    database: openDatabase(':memory:', MIGRATIONS),
+    database,
   });
   passwordHash ??= hashPassword(DEMO_PASSWORD);
   const hash = await passwordHash;

@@ -1,6 +1,7 @@
 import { createHash, randomUUID } from 'node:crypto';
 import { sql } from 'drizzle-orm';
 import { type UnitInput } from '@shared/contracts/units';
+import { type Member } from '@api/companies/actor';
 import { type Answer, type Caller, type Market } from './market-factory';
 import { unitFactory } from './catalogue-factory';
 
@@ -17,6 +18,23 @@ export function as(market: Market, email: string): Promise<Caller> {
   const caller = known.get(when) ?? market.as(email);
   known.set(when, caller);
   return caller;
+}
+
+/** Someone of the market as use cases see them, without a sign-in: `buyer.ottery`. */
+export function memberFactory({ dependencies }: Pick<Market, 'dependencies'>, personId: string): Member {
+  const { name, email, roles, company } = dependencies.stores.people.user(personId);
+  return {
+    personId,
+    sessionId: 'none',
+    name,
+    email,
+    roles,
+    companyId: company.id,
+    companyKind: company.kind,
+    companyName: company.name,
+    timeZone: company.timeZone,
+    orderLimitMinor: null,
+  };
 }
 
 export interface LineWish {
