@@ -1,3 +1,4 @@
+import { setImmediate } from 'node:timers/promises';
 import { type WholesaleQuote } from './document-models';
 import { type Formats } from './formats';
 import { type Paper } from './paper';
@@ -7,7 +8,7 @@ const strong = { size: 9.5, weight: 700 as const };
 const plain = { size: 8.5 };
 
 /** On pages of their own, what each line is made up of: for one unit, row by row. */
-export function writeChargeSheets(paper: Paper, lines: WholesaleQuote['lines'], format: Formats): void {
+export async function writeChargeSheets(paper: Paper, lines: WholesaleQuote['lines'], format: Formats): Promise<void> {
   const figures = [84, 56, 56, 48, 60];
   const columns: Column[] = [
     { head: 'For each unit', width: paper.width - figures.reduce((sum, width) => sum + width, 0), align: 'start' },
@@ -45,6 +46,7 @@ export function writeChargeSheets(paper: Paper, lines: WholesaleQuote['lines'], 
     }
     paper.rule(paper.y + 2);
     paper.y += 8;
+    await setImmediate();
   }
   endTable(paper);
 }

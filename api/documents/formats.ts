@@ -6,27 +6,27 @@ import { type Money } from '@shared/money/money';
 
 /** How figures and days stand on paper, in the locale of the company that sends it. */
 export function formats({ locale, timeZone }: { locale: string; timeZone: string }) {
-  const plain = new Map<string, Intl.NumberFormat>();
-  const withSign = new Map<string, Intl.NumberFormat>();
+  const kept = new Map<string, Intl.NumberFormat>();
+  const numberFormat = (options: Intl.NumberFormatOptions) => {
+    const key = JSON.stringify(options);
+    const format = kept.get(key) ?? new Intl.NumberFormat(locale, options);
+    kept.set(key, format);
+    return format;
+  };
   const dayFormat = new Intl.DateTimeFormat(locale, { dateStyle: 'long', timeZone: 'UTC' });
   const instantFormat = new Intl.DateTimeFormat(locale, { dateStyle: 'long', timeZone });
-  const numberFormat = (currency: Money['currency'], kept: Map<string, Intl.NumberFormat>, style: Intl.NumberFormatOptions) => {
-    const found = kept.get(currency) ?? new Intl.NumberFormat(locale, style);
-    kept.set(currency, found);
-    return found;
-  };
   // Intl takes a decimal string without making a float of it; the types know only number.
   const write = (format: Intl.NumberFormat, amount: string) => format.format(amount as `${number}`).replace('-', '−');
   return {
     /** `1,105.38`, for columns whose head names the currency */
     amount: ({ amount, currency }: Money): string => {
       const digits = { minimumFractionDigits: minorDigits[currency], maximumFractionDigits: minorDigits[currency] };
-      return write(numberFormat(currency, plain, digits), amount);
+      return write(numberFormat(digits), amount);
     },
     /** `$1,105.38` */
-    money: ({ amount, currency }: Money): string => write(numberFormat(currency, withSign, { style: 'currency', currency }), amount),
+    money: ({ amount, currency }: Money): string => write(numberFormat({ style: 'currency', currency }), amount),
     /** a decimal string of any length, cut to at most `digits` decimals */
-    number: (value: string, digits: number): string => write(new Intl.NumberFormat(locale, { maximumFractionDigits: digits }), value),
+    number: (value: string, digits: number): string => write(numberFormat({ maximumFractionDigits: digits }), value),
     /** `YYYY-MM-DD` in words */
     day: (day: string): string => dayFormat.format(new Date(`${day}T00:00:00Z`)),
     /** the day of an instant at the company */

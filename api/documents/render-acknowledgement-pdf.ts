@@ -36,7 +36,7 @@ export async function renderAcknowledgementPdf(order: AcknowledgementDocument): 
       ['Terms', order.terms],
     ],
   });
-  writeUnitTable(paper, createDraughtsman(paper), lines, { catalogue, measureSystem, format, currency: totals.total.currency });
+  await writeUnitTable(paper, createDraughtsman(paper), lines, { catalogue, measureSystem, format, currency: totals.total.currency });
   writeOrderTotals(paper, totals, format, 'Total');
   writeNote(
     paper,

@@ -33,7 +33,7 @@ export async function renderQuotePdf(quote: QuoteDocument): Promise<Uint8Array> 
     ],
   });
   const currency = (quote.prices === 'retail' ? quote.total : quote.totals.total).currency;
-  writeUnitTable(paper, createDraughtsman(paper), lines, { catalogue, measureSystem, format, currency });
+  await writeUnitTable(paper, createDraughtsman(paper), lines, { catalogue, measureSystem, format, currency });
   if (quote.prices === 'retail') {
     writeTotals(paper, [[unitsText(quote, format), '']], ['Total', format.money(quote.total)]);
     writeNote(
@@ -46,7 +46,7 @@ export async function renderQuotePdf(quote: QuoteDocument): Promise<Uint8Array> 
   }
   if (quote.notes !== '') writeNote(paper, 'Notes', quote.notes);
   writeCaution(paper);
-  if (quote.prices === 'wholesale') writeChargeSheets(paper, quote.lines, format);
+  if (quote.prices === 'wholesale') await writeChargeSheets(paper, quote.lines, format);
   return paper.finish();
 }
 

@@ -1,3 +1,4 @@
+import { setImmediate } from 'node:timers/promises';
 import { type Catalogue } from '@shared/contracts/catalogue';
 import { elevation } from '@shared/drawings/elevation';
 import { section } from '@shared/drawings/section';
@@ -19,12 +20,12 @@ const soft = { size: 8, role: 'soft' as const };
 const strong = { size: 9.5, weight: 700 as const };
 
 /** The lines of a document: tag, size in both measures, make-up and details, both drawings, and what it costs. */
-export function writeUnitTable(
+export async function writeUnitTable(
   paper: Paper,
   draughtsman: Draughtsman,
   lines: readonly UnitLine[],
   { catalogue, measureSystem, format, currency }: { catalogue: Catalogue; measureSystem: MeasureSystem; format: Formats; currency: string },
-): void {
+): Promise<void> {
   const [quantity, price, total] = [34, 58, 64];
   const columns: Column[] = [
     { head: 'Unit, width × height', width: paper.width - DRAWINGS - quantity - price - total, align: 'start' },
@@ -34,7 +35,11 @@ export function writeUnitTable(
     { head: currency, width: total, align: 'end' },
   ];
   startTable(paper, columns);
-  for (const line of lines) writeUnit(line);
+  for (const line of lines) {
+    writeUnit(line);
+    // Others have their turn between lines: hundreds of them take seconds.
+    await setImmediate();
+  }
   endTable(paper);
 
   function writeUnit({ position, tag, unit, makeUp, quantity: count, unitPrice, linePrice }: UnitLine): void {
