@@ -1,6 +1,6 @@
 import { eq } from 'drizzle-orm';
 import { contractPrices, promotions } from '@api/database/schema/pricing';
-import { tradeAccounts } from '@api/database/schema/companies';
+import { addresses, tradeAccounts } from '@api/database/schema/companies';
 import { type Offer, priceAnswer } from '@shared/contracts/prices';
 import { minorOf } from '@shared/money/money';
 import { raise } from '@seeds/demo/price-lists';
@@ -193,6 +193,22 @@ describe('prices', () => {
   it('goes to the first address where none is named', async () => {
     const named = await price({ lines, shipTo: 'ottery.place-1' });
     expect((await price({ lines })).body).toEqual(named.body);
+  });
+
+  it('prices goods alone for a dealer whose ship-to book is empty, and makes no quote', async () => {
+    const { db } = market.dependencies.database;
+    const book = db.select().from(addresses).where(eq(addresses.companyId, 'millrace')).all();
+    const neighbour = await market.as('buyer@millrace.example');
+    db.delete(addresses).where(eq(addresses.companyId, 'millrace')).run();
+    try {
+      const offer = offerOf(await neighbour.post('/api/prices', { lines }), 'northmere');
+      expect(offer.tax).toEqual([]);
+      expect(offer.orderCharges!.map(({ family }) => family)).toEqual(['surcharge']);
+      const quote = await neighbour.post('/api/quotes', { tradeAccount: 'millrace.northmere', lines });
+      expect(quote).toMatchObject({ status: 422, body: { errors: [{ pointer: '/shipTo' }] } });
+    } finally {
+      db.insert(addresses).values(book).run();
+    }
   });
 
   it('takes a contract before the tier, for its own account and days alone', async () => {
