@@ -37,10 +37,7 @@ export function minorOf(amount: string, currency: Currency): number {
 
 /** Rounds an exact amount in whole currency units to minor units, halves away from zero. */
 export function roundToMinor(amount: Exact, currency: Currency): number {
-  const minor = amount
-    .times(Exact.pow(10, minorDigits[currency]))
-    .toDecimalPlaces(0, Exact.ROUND_HALF_UP)
-    .toNumber();
+  const minor = amount.times(Exact.pow(10, minorDigits[currency])).toDecimalPlaces(0, Exact.ROUND_HALF_UP).toNumber();
   if (!Number.isSafeInteger(minor)) throw new RangeError(`${amount.toString()} ${currency} is too large`);
   return minor === 0 ? 0 : minor;
 }
