@@ -54,6 +54,37 @@ export function companyStore(db: Db) {
     })
     .where(eq(accountBalances.tradeAccountId, id))
     .prepare();
+  const addressOf = db
+    .select()
+    .from(addresses)
+    .where(and(eq(addresses.id, id), eq(addresses.companyId, sql.placeholder('companyId'))))
+    .prepare();
+  const certificate = db
+    .select()
+    .from(exemptionCertificates)
+    .where(
+      and(
+        eq(exemptionCertificates.dealerId, id),
+        eq(exemptionCertificates.jurisdiction, sql.placeholder('jurisdiction')),
+        lte(exemptionCertificates.validFrom, sql.placeholder('on')),
+        gte(exemptionCertificates.validUntil, sql.placeholder('on')),
+      ),
+    )
+    .prepare();
+  const recordChange = db
+    .insert(auditRows)
+    .values({
+      companyId: sql.placeholder('companyId'),
+      personId: sql.placeholder('personId'),
+      at: sql.placeholder('at'),
+      action: sql.placeholder('action'),
+      subjectKind: sql.placeholder('subjectKind'),
+      subjectId: sql.placeholder('subjectId'),
+      before: sql.placeholder('before'),
+      after: sql.placeholder('after'),
+      reason: sql.placeholder('reason'),
+    })
+    .prepare();
   const tradeAccount = (accountId: string): TradeAccountRow | undefined => {
     const row = accountById.get({ id: accountId });
     return row && flat(row);
@@ -112,12 +143,7 @@ export function companyStore(db: Db) {
     addToBalances: (accountId: string, change: { receivableMinor?: number; unappliedMinor?: number; reservedMinor?: number }) =>
       addToBalances.run({ receivableMinor: 0, unappliedMinor: 0, reservedMinor: 0, ...change, id: accountId }),
 
-    addressOf: (companyId: string, addressId: string) =>
-      db
-        .select()
-        .from(addresses)
-        .where(and(eq(addresses.id, addressId), eq(addresses.companyId, companyId)))
-        .get(),
+    addressOf: (companyId: string, addressId: string) => addressOf.get({ id: addressId, companyId }),
 
     firstAddressOf: (companyId: string) =>
       db.select().from(addresses).where(eq(addresses.companyId, companyId)).orderBy(asc(addresses.position)).limit(1).get(),
@@ -132,19 +158,7 @@ export function companyStore(db: Db) {
         .all(),
 
     /** The exemption certificate of a dealer for a jurisdiction in force on a day. */
-    certificate: (dealerId: string, jurisdiction: string, on: string) =>
-      db
-        .select()
-        .from(exemptionCertificates)
-        .where(
-          and(
-            eq(exemptionCertificates.dealerId, dealerId),
-            eq(exemptionCertificates.jurisdiction, jurisdiction),
-            lte(exemptionCertificates.validFrom, on),
-            gte(exemptionCertificates.validUntil, on),
-          ),
-        )
-        .get(),
+    certificate: (dealerId: string, jurisdiction: string, on: string) => certificate.get({ id: dealerId, jurisdiction, on }),
 
     companiesAfter: (after: [string, string] | undefined, limit: number) =>
       db
@@ -160,7 +174,7 @@ export function companyStore(db: Db) {
         .all(),
 
     /** Who changed what, before and after. */
-    recordChange: (row: Omit<typeof auditRows.$inferInsert, 'id'>) => db.insert(auditRows).values(row).run(),
+    recordChange: (row: Required<Omit<typeof auditRows.$inferInsert, 'id'>>) => recordChange.run(row),
   };
 }
 

@@ -35,6 +35,12 @@ export function peopleStore(db: Db) {
       ),
     )
     .prepare();
+  const byId = db
+    .select({ person: people, company: companies })
+    .from(people)
+    .innerJoin(companies, eq(companies.id, people.companyId))
+    .where(eq(people.id, sql.placeholder('id')))
+    .prepare();
   const rolesOf = db
     .select({ role: personRoles.role })
     .from(personRoles)
@@ -52,12 +58,7 @@ export function peopleStore(db: Db) {
 
     /** @throws Error when there is no such person: ids come from a session */
     user: (personId: string): User => {
-      const found = db
-        .select({ person: people, company: companies })
-        .from(people)
-        .innerJoin(companies, eq(companies.id, people.companyId))
-        .where(eq(people.id, personId))
-        .get();
+      const found = byId.get({ id: personId });
       if (!found) throw new Error(`no person ${personId}`);
       const { person, company } = found;
       return {

@@ -1,4 +1,4 @@
-import { and, asc, desc, eq, lte } from 'drizzle-orm';
+import { and, asc, desc, eq, lte, sql } from 'drizzle-orm';
 import { type Db } from '../database/open-database';
 import { type MailAttachment, outboxMails } from '../database/schema/mail';
 
@@ -37,15 +37,35 @@ export function outboxStore(db: Db) {
       .where(and(eq(outboxMails.id, id), eq(outboxMails.state, 'waiting')))
       .run();
 
+  // Written with every order and invoice: built once.
+  const place = sql.placeholder;
+  const insert = db
+    .insert(outboxMails)
+    .values({
+      id: place('id'),
+      companyId: place('companyId'),
+      messageId: place('messageId'),
+      fromName: place('fromName'),
+      replyTo: place('replyTo'),
+      to: place('to'),
+      subject: place('subject'),
+      body: place('body'),
+      attachments: place('attachments'),
+      subjectKind: place('subjectKind'),
+      subjectId: place('subjectId'),
+      state: 'waiting',
+      nextAttemptAt: place('createdAt'),
+      createdAt: place('createdAt'),
+    })
+    .prepare();
+
   return {
     /**
      * Keeps a mail to be sent. Called inside the business transaction, so that the mail exists
      * exactly when what it speaks of does.
      */
     write: (mail: NewMail): void => {
-      db.insert(outboxMails)
-        .values({ ...mail, state: 'waiting', nextAttemptAt: mail.createdAt })
-        .run();
+      insert.run({ ...mail });
     },
 
     /** Mails about one thing, newest first. */

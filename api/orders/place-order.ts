@@ -132,7 +132,7 @@ function write(
   stores.orders.recordMove({ orderId: id, from: null, to: state, at, personId: actor.personId, reason });
   const reservedMinor = reservedMinorOf(order, account.countsFrom);
   if (reservedMinor !== 0) stores.companies.addToBalances(account.id, { reservedMinor });
-  stores.quotes.change(order.quoteId ?? '', { state: 'ordered', updatedAt: at });
+  stores.quotes.markOrdered(order.quoteId ?? '', at);
   stores.companies.recordChange({
     companyId: actor.companyId,
     personId: actor.personId,

@@ -47,6 +47,11 @@ export function quoteStore(db: Db) {
     .leftJoin(orders, eq(orders.quoteId, quotes.id))
     .where(eq(quotes.id, sql.placeholder('id')))
     .prepare();
+  const markOrdered = db
+    .update(quotes)
+    .set({ state: 'ordered', updatedAt: sql`${sql.placeholder('at')}` })
+    .where(eq(quotes.id, sql.placeholder('id')))
+    .prepare();
   const linesOf = db
     .select()
     .from(quoteLines)
@@ -78,6 +83,8 @@ export function quoteStore(db: Db) {
     insert: (row: QuoteRow): void => {
       db.insert(quotes).values(row).run();
     },
+
+    markOrdered: (id: string, at: number) => markOrdered.run({ id, at }),
 
     change: (id: string, change: Partial<QuoteRow>): void => {
       db.update(quotes).set(change).where(eq(quotes.id, id)).run();
