@@ -1,5 +1,5 @@
-import { ChangeDetectionStrategy, Component, computed, inject } from '@angular/core';
-import { cautionsOf } from './cautions';
+import { ChangeDetectionStrategy, Component, computed, inject, input } from '@angular/core';
+import { loadCaution, placeCautions } from './cautions';
 import { UnitDraft } from './unit-draft';
 
 /** Cautions about the unit and its place. They advise; they never certify. */
@@ -53,5 +53,11 @@ import { UnitDraft } from './unit-draft';
 })
 export class CautionNotes {
   private readonly draft = inject(UnitDraft);
-  protected readonly cautions = computed(() => cautionsOf(this.draft.evaluation()));
+  /** what the unit bears, or what its place asks for */
+  readonly about = input.required<'loads' | 'place'>();
+  protected readonly cautions = computed(() => {
+    const evaluation = this.draft.evaluation();
+    if (this.about() === 'loads') return [loadCaution(evaluation)];
+    return placeCautions(evaluation, this.draft.shown().place?.altitude, this.draft.catalogue(), this.draft.system());
+  });
 }

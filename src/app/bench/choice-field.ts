@@ -13,7 +13,7 @@ export interface Option {
   imports: [MatFormFieldModule, MatInput],
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
-    <mat-form-field appearance="outline" subscriptSizing="dynamic">
+    <mat-form-field appearance="fill" floatLabel="always" subscriptSizing="dynamic">
       <mat-label>{{ label() }}</mat-label>
       <select #list matNativeControl (change)="chosen.emit(list.value)">
         @for (option of options(); track option.value) {
@@ -22,15 +22,7 @@ export interface Option {
       </select>
     </mat-form-field>
   `,
-  styles: `
-    :host {
-      display: block;
-      min-width: 0;
-    }
-    mat-form-field {
-      width: 100%;
-    }
-  `,
+  styleUrl: '../ui/boxed-field.scss',
 })
 export class ChoiceField {
   readonly label = input.required<string>();

@@ -12,8 +12,8 @@ import { TakeNearest } from './take-nearest';
   template: `
     @if (note(); as nobody) {
       <p>
-        <app-icon name="warning" /> No maker can build this. {{ nobody.maker }} comes nearest: {{ details() }}.
-        <app-take-nearest [reasons]="nobody.reasons" />
+        <app-icon name="warning" /> No maker can build this. {{ nobody.maker.name }} comes nearest: {{ details() }}.
+        <app-take-nearest [maker]="nobody.maker.id" />
       </p>
     }
   `,

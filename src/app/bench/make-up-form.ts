@@ -30,6 +30,7 @@ import { UnitDraft } from './unit-draft';
   styles: `
     :host {
       display: grid;
+      grid-template-columns: minmax(0, 1fr);
       gap: 10px;
     }
     p {

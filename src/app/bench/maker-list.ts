@@ -1,12 +1,11 @@
 import { ChangeDetectionStrategy, Component, computed, inject, input } from '@angular/core';
-import { Icon } from '../ui/icon';
 import { MakerReasons } from './maker-reasons';
 import { UnitDraft } from './unit-draft';
 
 /** Who can build the unit and, of those who cannot, which rule stands against it and what would do. */
 @Component({
   selector: 'app-maker-list',
-  imports: [Icon, MakerReasons],
+  imports: [MakerReasons],
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
     <ul>
@@ -17,11 +16,9 @@ import { UnitDraft } from './unit-draft';
             <span class="sy-soft sy-small">{{ maker.canBuild ? 'can build it' : 'cannot build it' }}</span>
           </p>
           @if (!maker.canBuild) {
-            <app-maker-reasons [reasons]="maker.reasons" />
+            <app-maker-reasons [maker]="maker.fabricator.id" [reasons]="maker.reasons" />
           }
         </li>
-      } @empty {
-        <li class="no"><app-icon name="info" /> No maker is listed yet.</li>
       }
     </ul>
   `,

@@ -14,7 +14,7 @@ import { TakeNearest } from './take-nearest';
         <li>{{ detail }}</li>
       }
     </ul>
-    <app-take-nearest [reasons]="reasons()" />
+    <app-take-nearest [maker]="maker()" />
   `,
   styles: `
     :host {
@@ -31,5 +31,7 @@ import { TakeNearest } from './take-nearest';
 })
 export class MakerReasons {
   readonly reasons = input.required<readonly Reason[]>();
+  /** identity of the maker */
+  readonly maker = input.required<string>();
   protected readonly details = computed(() => detailsOf(this.reasons()));
 }

@@ -4,7 +4,7 @@ import { UnitDraft } from './unit-draft';
 
 /** The maker that comes nearest, and what of one field it refuses. */
 export interface NobodyNote {
-  maker: string;
+  maker: { id: string; name: string };
   reasons: readonly Reason[];
 }
 
@@ -24,6 +24,6 @@ export class NobodyBuilds {
   at(pointer: string): NobodyNote | null {
     const nearest = this.nearest();
     const reasons = nearest?.reasons.filter((reason) => reason.pointer === pointer || reason.pointer.startsWith(`${pointer}/`)) ?? [];
-    return nearest && reasons.length > 0 ? { maker: nearest.fabricator.name, reasons } : null;
+    return nearest && reasons.length > 0 ? { maker: nearest.fabricator, reasons } : null;
   }
 }

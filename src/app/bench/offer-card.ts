@@ -43,8 +43,8 @@ export class OfferCard {
   /** What an order of this line alone would come to, where more than the goods is charged. */
   protected readonly alone = computed(() => {
     const { orderCharges = [], tax = [], total } = this.offer();
-    const more = [...orderCharges.map(({ label }) => label.toLowerCase()), ...tax.map(({ label }) => label.toLowerCase())];
-    return total && more.length > 0 ? { total, more: more.join(', ') } : null;
+    const more = [...orderCharges, ...tax].map(({ label }) => label);
+    return total && more.length > 0 ? { total, more: more.join('; ') } : null;
   });
 
   protected take({ width, height }: Hint): void {

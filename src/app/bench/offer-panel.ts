@@ -17,7 +17,7 @@ import { UnitDraft } from './unit-draft';
   providers: [MoneyPipe],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './offer-panel.html',
-  styleUrl: './offer-panel.scss',
+  styleUrls: ['./section-head.scss', './offer-panel.scss'],
 })
 export class OfferPanel {
   protected readonly price = inject(LivePrice);
@@ -34,7 +34,15 @@ export class OfferPanel {
   });
   /** The charge sheet of the chosen offer shows, until it is folded. */
   protected readonly unfolded = linkedSignal({ source: () => this.maker.offer()?.tradeAccount, computation: () => true });
-  protected readonly named = computed(() => this.price.lastOffers().map(({ fabricator }) => fabricator.id));
+  /** Those that can build it first; what is on its way stands where it stood. */
+  protected readonly offers = computed(() => {
+    const offers = this.price.lastOffers();
+    return [...offers.filter(({ canBuild }) => canBuild), ...offers.filter(({ canBuild }) => !canBuild)];
+  });
+  protected readonly named = computed(() => this.offers().map(({ fabricator }) => fabricator.id));
+  protected readonly hasOthers = computed(() =>
+    this.draft.evaluation().buildability.some(({ fabricator }) => !this.named().includes(fabricator.id)),
+  );
   protected readonly mayReadCredit = computed(() => this.session.may('trade-accounts.credit'));
   protected readonly status = computed(() => {
     switch (this.price.state().is) {

@@ -42,7 +42,7 @@ export class ResultStrip {
         unit: weightUnit,
         below:
           quantity > 1
-            ? `${formatWeight(weight, other)}; ${quantity} weigh ${formatWeight(weight * quantity, system)}`
+            ? `${formatWeight(weight, other)}; all ${quantity} ${formatWeight(weight * quantity, system)}`
             : formatWeight(weight, other),
       },
       {
@@ -97,5 +97,5 @@ function plainName(name: string): string {
 }
 
 function lightWords(light: number | null): string {
-  return light === null ? '' : `lets in ${Math.round(light * 100)} % of the light`;
+  return light === null ? '' : `light ${light.toFixed(2)}`;
 }

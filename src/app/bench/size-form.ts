@@ -1,16 +1,14 @@
 import { ChangeDetectionStrategy, Component, computed, inject, output, viewChild } from '@angular/core';
 import { LengthField } from '../ui/length-field';
-import { ChoiceField } from './choice-field';
 import { FieldNote } from './field-note';
 import { NobodyBuilds } from './nobody-builds';
-import { ReaderMeasures } from './reader-measures';
 import { TextField } from './text-field';
 import { UnitDraft } from './unit-draft';
 
 /** Width and height as seen from outside, how many, and the dealer's own mark. Enter adds the line. */
 @Component({
   selector: 'app-size-form',
-  imports: [ChoiceField, FieldNote, LengthField, TextField],
+  imports: [FieldNote, LengthField, TextField],
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
     <app-length-field
@@ -52,14 +50,12 @@ import { UnitDraft } from './unit-draft';
         (entered)="entered.emit()"
       />
     </div>
-    @if (measures.mayChoose()) {
-      <app-choice-field label="Measures" [options]="systems" [value]="draft.system()" (chosen)="choose($event)" />
-    }
   `,
   styles: `
     :host {
       display: grid;
-      gap: 12px;
+      grid-template-columns: minmax(0, 1fr);
+      gap: 10px;
     }
     app-length-field,
     .pair {
@@ -77,14 +73,9 @@ export class SizeForm {
   /** Enter was pressed in one of the fields */
   readonly entered = output();
   protected readonly draft = inject(UnitDraft);
-  protected readonly measures = inject(ReaderMeasures);
   private readonly nobody = inject(NobodyBuilds);
   private readonly width = viewChild.required<LengthField>('width');
 
-  protected readonly systems = [
-    { value: 'imperial', label: 'Inches' },
-    { value: 'metric', label: 'Millimetres' },
-  ];
   protected readonly widthNote = computed(() => this.nobody.at('/width'));
   protected readonly heightNote = computed(() => this.nobody.at('/height'));
   protected readonly quantityProblem = computed(() => this.draft.problemAt('/quantity'));
@@ -93,9 +84,5 @@ export class SizeForm {
   /** Ready for the next size. */
   focusWidth(): void {
     this.width().focus();
-  }
-
-  protected choose(system: string): void {
-    this.measures.choose(system === 'metric' ? 'metric' : 'imperial');
   }
 }

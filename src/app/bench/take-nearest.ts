@@ -1,24 +1,23 @@
 import { ChangeDetectionStrategy, Component, computed, inject, input } from '@angular/core';
-import { type Reason } from '@shared/contracts/evaluation';
+import { findWay } from './find-way';
 import { takesWords } from './reason-words';
-import { canApplyNearest } from './apply-nearest';
 import { UnitDraft } from './unit-draft';
 
-/** A button that changes the unit to the nearest that passes, where there is one. */
+/** A button that changes the unit to the nearest that a maker can build, where there is one. */
 @Component({
   selector: 'app-take-nearest',
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
-    @if (words(); as nearest) {
-      <button type="button" class="quiet" (click)="draft.take(reasons())">Take {{ nearest }}</button>
+    @if (way(); as found) {
+      <button type="button" class="quiet" (click)="draft.take(found.unit)">Take {{ words() }}</button>
     }
   `,
   styleUrl: './quiet.scss',
 })
 export class TakeNearest {
-  readonly reasons = input.required<readonly Reason[]>();
+  /** identity of the maker */
+  readonly maker = input.required<string>();
   protected readonly draft = inject(UnitDraft);
-  protected readonly words = computed(() =>
-    canApplyNearest(this.reasons()) ? takesWords(this.reasons(), this.draft.catalogue(), this.draft.system()) : '',
-  );
+  protected readonly way = computed(() => findWay(this.draft.shown(), this.maker(), this.draft.catalogue()));
+  protected readonly words = computed(() => takesWords(this.way()?.met ?? [], this.draft.catalogue(), this.draft.system()));
 }

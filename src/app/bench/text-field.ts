@@ -24,7 +24,7 @@ const PAUSE = 900;
   imports: [ReactiveFormsModule, MatFormFieldModule, MatInput],
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
-    <mat-form-field appearance="outline" subscriptSizing="dynamic">
+    <mat-form-field appearance="fill" floatLabel="always" subscriptSizing="dynamic">
       <mat-label>{{ label() }}</mat-label>
       <input
         #field
@@ -46,37 +46,15 @@ const PAUSE = 900;
       }
       @if (shown(); as words) {
         <mat-error>{{ words }}</mat-error>
-      } @else if (hint()) {
-        <mat-hint>{{ hint() }}</mat-hint>
       }
     </mat-form-field>
   `,
-  styles: `
-    :host {
-      display: block;
-      min-width: 0;
-    }
-    mat-form-field {
-      width: 100%;
-    }
-    .beside {
-      padding-left: 8px;
-      color: var(--sy-soft);
-      font-size: 13px;
-      white-space: nowrap;
-    }
-    mat-error,
-    mat-hint {
-      padding-bottom: 2px;
-      font-size: 13px;
-    }
-  `,
+  styleUrl: '../ui/boxed-field.scss',
 })
 export class TextField {
   readonly label = input.required<string>();
   readonly text = input.required<string>();
   readonly problem = input<string | null>(null);
-  readonly hint = input('');
   readonly suffix = input('');
   readonly keys = input<'numeric' | 'decimal' | null>(null);
   readonly longest = input(80);

@@ -1,5 +1,5 @@
 import { computed, effect, inject, Injectable, linkedSignal, signal, untracked } from '@angular/core';
-import { type Evaluation, type Reason } from '@shared/contracts/evaluation';
+import { type Evaluation } from '@shared/contracts/evaluation';
 import { type Lite, type Unit } from '@shared/contracts/units';
 import { evaluateUnit } from '@shared/glazing/evaluate-unit';
 import { makeUpText } from '@shared/glazing/make-up-text';
@@ -8,7 +8,7 @@ import { CurrentCatalogue } from '../api-client/current-catalogue';
 import { lengthText } from '../ui/read-length';
 import { type Cavity, type Draft, firstDraft, readDraft, type ReadDraft } from './draft';
 import { addLite, removeLite, swapSides } from './layers';
-import { applyNearest } from './apply-nearest';
+import { type Buildable } from './apply-reason';
 import { ReaderMeasures } from './reader-measures';
 import { rewriteDraft } from './rewrite-draft';
 
@@ -125,9 +125,11 @@ export class UnitDraft {
     this.change('chosen', { width: lengthText(width, this.system()), height: lengthText(height, this.system()) });
   }
 
-  /** Changes all that a maker's reasons name to the nearest that the maker can build. */
-  take(reasons: readonly Reason[]): void {
-    this.change('chosen', { makeUp: null, ...applyNearest(reasons, this.now()) });
+  /** Takes over size and layers, such as the nearest that a maker can build. Texts that mean the same stay as they were typed. */
+  take({ width, height, lites, cavities }: Buildable): void {
+    const shown = this.shown();
+    const text = (field: 'width' | 'height', mm: string) => (mm === shown[field] ? this.now()[field] : lengthText(mm, this.system()));
+    this.change('chosen', { width: text('width', width), height: text('height', height), lites, cavities, makeUp: null });
   }
 
   private chooseLayers(change: Partial<Pick<Draft, 'lites' | 'cavities'>>): void {

@@ -21,6 +21,7 @@ import { MakerList } from './maker-list';
       </div>
     }
   `,
+  styleUrl: './section-head.scss',
   styles: `
     :host {
       display: block;

@@ -1,4 +1,5 @@
 import { ChangeDetectionStrategy, Component, effect, inject, untracked, viewChild } from '@angular/core';
+import { otherMeasure } from '@shared/measures/format-length';
 import { Asker } from '../ui/asker';
 import { AddBar } from './add-bar';
 import { BenchAddress } from './bench-address';
@@ -10,6 +11,7 @@ import { MakeUpForm } from './make-up-form';
 import { OfferPanel } from './offer-panel';
 import { PlaceForm } from './place-form';
 import { ResultStrip } from './result-strip';
+import { ReaderMeasures } from './reader-measures';
 import { SizeForm } from './size-form';
 import { UnitDraft } from './unit-draft';
 import { UnitDrawings } from './unit-drawings';
@@ -22,12 +24,13 @@ import { VisitorPanel } from './visitor-panel';
   providers: [BenchAddress],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './workbench.html',
-  styleUrls: ['./workbench.scss', './quiet.scss'],
+  styleUrls: ['./section-head.scss', './workbench.scss', './quiet.scss'],
   host: { '(document:keydown)': 'key($event)' },
 })
 export class Workbench {
   protected readonly draft = inject(UnitDraft);
   protected readonly price = inject(LivePrice);
+  protected readonly measures = inject(ReaderMeasures);
   private readonly quotes = inject(CurrentQuotes);
   private readonly asker = inject(Asker);
   private readonly sizes = viewChild.required(SizeForm);
@@ -51,6 +54,10 @@ export class Workbench {
   /** The line is on its way: ready for the next size. */
   protected next(): void {
     this.sizes().focusWidth();
+  }
+
+  protected turnMeasures(): void {
+    this.measures.choose(otherMeasure(this.draft.system()));
   }
 
   protected key(event: KeyboardEvent): void {

@@ -33,7 +33,7 @@ let count = 0;
   imports: [ReactiveFormsModule, MatFormFieldModule, MatInput],
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
-    <mat-form-field appearance="outline" subscriptSizing="dynamic">
+    <mat-form-field appearance="fill" floatLabel="always" subscriptSizing="dynamic">
       <mat-label>{{ label() }}</mat-label>
       <input
         #field
@@ -65,25 +65,10 @@ let count = 0;
       }
     </mat-form-field>
   `,
+  styleUrl: './boxed-field.scss',
   styles: `
-    :host {
-      display: block;
-    }
-    mat-form-field {
-      width: 100%;
-    }
-    .beside {
-      padding-left: 8px;
-      color: var(--sy-soft);
-      font-size: 13px;
-      white-space: nowrap;
-    }
     .unit:not(:empty) {
       margin-right: 6px;
-    }
-    mat-error {
-      padding-bottom: 2px;
-      font-size: 13px;
     }
   `,
 })

@@ -40,17 +40,17 @@ function sumWords(row: ChargeRow, reader: Reader): string {
   const { family, basis, rate } = row;
   const { locale } = reader;
   const currency = row.list.currency;
-  const product = exact(basis.quantity).times(exact(rate));
+  const product = unrounded(basis.quantity).times(unrounded(rate));
   if (family === 'quantity break' || family === 'promotion') {
-    const part = percentWords(exact(rate).times(-100), reader);
+    const part = percentWords(unrounded(rate).times(-100), reader);
     const taken = rounding(product.abs(), opposite(row.net), reader);
     return `${part} of ${amount(basis.quantity, currency, locale)}, the net price so far, is ${taken}, taken off.`;
   }
   if (isCurrency(basis.unit)) {
-    const part = percentWords(exact(rate).times(100), reader);
+    const part = percentWords(unrounded(rate).times(100), reader);
     return `${part} of ${amount(basis.quantity, currency, locale)}, the charges by area at list, is ${rounding(product, row.list, reader)}.`;
   }
-  const counted = `${number(exact(basis.quantity), locale, 4)} ${basis.unit}`;
+  const counted = `${number(unrounded(basis.quantity), locale, 4)} ${basis.unit}`;
   const at = `${counted} at ${amount(rate, currency, locale)} per ${basis.unit}`;
   if (family === 'net rate') {
     return `${at} make ${rounding(product, row.net, reader)}. This agreed net rate stands in place of the charges by area, ${amount(row.list.amount, currency, locale)} at list.`;
@@ -81,6 +81,12 @@ function ruleWords({ rule }: ChargeRow, list: ListInWords | null, { locale, time
   if (!list) return `Rule ${rule}.`;
   const day = new Date(list.effectiveFrom).toLocaleDateString(locale, { timeZone, day: 'numeric', month: 'long', year: 'numeric' });
   return `Rule ${rule} of ${list.name}, in force from ${day}.`;
+}
+
+/** Reads an unrounded figure of a row, which carries up to forty digits: more than `exact` takes from people. */
+function unrounded(text: string): Exact {
+  if (!/^-?\d{1,40}(\.\d{1,60})?$/.test(text)) throw new TypeError(`not a decimal string: ${text}`);
+  return new Exact(text);
 }
 
 function opposite({ amount: text, currency }: Money): Money {
