@@ -12,6 +12,9 @@ export interface Style {
 const ASCENT = 0.99;
 export const LEADING = 1.28;
 
+/** A space that a line may break at: not one within a measure such as `36 1/2 in`. */
+const breakable = / (?!(?<=\d )(?:\d+\/\d|in\b|mm\b|%))/;
+
 /** Sets text on the pages of one PDF: measures, breaks lines and writes. All in points. */
 export function createTypesetter(doc: PDFKit.PDFDocument) {
   registerFonts(doc);
@@ -38,7 +41,7 @@ export function createTypesetter(doc: PDFKit.PDFDocument) {
   const wrapParagraph = (paragraph: string, room: number, style: Style): string[] => {
     const lines: string[] = [];
     let current = '';
-    for (const word of paragraph.split(' ')) {
+    for (const word of paragraph.split(breakable)) {
       const longer = current === '' ? word : `${current} ${word}`;
       if (width(longer, style) <= room) {
         current = longer;

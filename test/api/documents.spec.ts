@@ -137,6 +137,18 @@ describe('documents', () => {
     expect(Math.max(...pages[0]!.map((text) => text.length))).toBeLessThan(90);
   });
 
+  it('breaks no line within a measure', async () => {
+    const line = invoiceFactory().lines[0]!;
+    const lines = Array.from({ length: 12 }, (_, i) => ({
+      ...line,
+      description: `${'low-e '.repeat(i)}36 1/2 × 48 1/4 in or 900 mm, 2 % more`,
+    }));
+    const texts = pdfPages(await renderInvoicePdf(invoiceFactory({ lines }))).flat();
+    for (const part of ['36 1/2', '48 1/4 in', '900 mm', '2 %']) {
+      expect({ part, whole: texts.filter((text) => text.includes(part)).length }).toEqual({ part, whole: part === '2 %' ? 14 : 12 });
+    }
+  });
+
   it('writes what the font lacks without its accent, or as a question mark, never as nothing', async () => {
     const text = await textOf(renderInvoicePdf(invoiceFactory({ poNumber: 'PO 硝 ⅛ Kůň' })));
     expect(text).toContain('PO ? 1⁄8 Kun');
