@@ -53,7 +53,11 @@ export async function sendDueMails(
 async function complete(mail: OutboxMail, renderAttachment: RenderAttachment) {
   const attachments = [];
   for (const attachment of mail.attachments) {
-    attachments.push({ fileName: attachment.fileName, contentType: 'application/pdf', bytes: await renderAttachment(attachment, mail.companyId) });
+    attachments.push({
+      fileName: attachment.fileName,
+      contentType: 'application/pdf',
+      bytes: await renderAttachment(attachment, mail.companyId),
+    });
   }
   const { messageId, fromName, replyTo, to, subject, body } = mail;
   return { messageId, fromName, replyTo, to, subject, body, writtenAt: new Date(mail.createdAt), attachments };
