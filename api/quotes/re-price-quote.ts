@@ -60,6 +60,7 @@ export function rePriceQuote(
       subjectId: quote.id,
       before: { priceListVersion: quote.priceListVersionId, totalMinor: quote.totalMinor },
       after: { priceListVersion: holding.version.version, totalMinor },
+      reason: null,
     });
   });
   return readQuote(actor, { params }, dependencies);
