@@ -8,6 +8,9 @@ export interface Product {
   stop(): Promise<void>;
 }
 
+/** What a start may take on a busy machine where the market is still to be made, ms. */
+export const START_TIMEOUT = 240_000;
+
 /** Starts the built product and waits until it is ready. @throws Error when it was not built or does not come up */
 export async function startProduct(environment: Record<string, string> = {}): Promise<Product> {
   const data = await copySeededMarket();

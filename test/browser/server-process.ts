@@ -54,6 +54,8 @@ function spawnServer(environment: Record<string, string>): { server: ChildProces
     env: { ...process.env, NODE_ENV: 'development', LOG_LEVEL: 'error', ...environment },
     stdio: ['ignore', 'pipe', 'pipe'],
   });
+  // Whoever started it may fail before stopping it: it must neither outlive them nor keep them.
+  process.once('exit', () => server.kill('SIGKILL'));
   let text = '';
   for (const output of [server.stdout, server.stderr]) output.on('data', (chunk: Buffer) => (text += chunk.toString()));
   return { server, said: () => text };
