@@ -20,7 +20,7 @@ export function listQuotes(
 ): AnswerOf<typeof listQuotesEndpoint> {
   const today = todayOf(actor, clock());
   const filter = { state: query.state, today, q: query.q?.trim(), tradeAccountId: query.tradeAccount };
-  const rows = stores.quotes.list(actor.companyId, filter, readCursor(query.cursor, 'number'), query.limit + 1);
+  const rows = stores.quotes.page(actor.companyId, filter, readCursor(query.cursor, 'number'), query.limit + 1).all();
   return toPage(
     rows,
     query.limit,

@@ -99,7 +99,7 @@ export function quoteStore(db: Db) {
     },
 
     /** Up to `limit` quotes of a dealer, newest first, after (created at, id). */
-    list: (dealerId: string, filter: QuoteFilter, after: [number, string] | undefined, limit: number): QuoteListRow[] =>
+    page: (dealerId: string, filter: QuoteFilter, after: [number, string] | undefined, limit: number) =>
       db
         .select({ ...listed, ...names })
         .from(quotes)
@@ -116,8 +116,7 @@ export function quoteStore(db: Db) {
           ),
         )
         .orderBy(desc(quotes.createdAt), desc(quotes.id))
-        .limit(limit)
-        .all(),
+        .limit(limit),
   };
 }
 

@@ -1,5 +1,6 @@
 import { type SQL, sql } from 'drizzle-orm';
 import { type OrderFilter } from '@api/orders/order-list-store';
+import { type QuoteFilter } from '@api/quotes/quote-store';
 import { type InvoiceFilter } from '@api/receivables/invoice-store';
 import { type ReceiptFilter } from '@api/receivables/receipt-store';
 import { type Market, marketFactory } from '../factories/market-factory';
@@ -95,6 +96,18 @@ describe('the plans of list queries', () => {
   ])('receipts %j walk %s', (filter, index) => {
     expectIndex(stores().receipts.page(filter, undefined, 51), index);
     expectIndex(stores().receipts.page(filter, [1, 'x'], 51), index);
+  });
+
+  it.each<[QuoteFilter, string]>([
+    [{ today: '2026-09-15' }, 'quotes_newest'],
+    [{ today: '2026-09-15', state: 'open' }, 'quotes_by_state'],
+    [{ today: '2026-09-15', state: 'expired' }, 'quotes_by_state'],
+    [{ today: '2026-09-15', state: 'ordered' }, 'quotes_by_state'],
+    [{ today: '2026-09-15', tradeAccountId: 'a' }, 'quotes_newest'],
+    [{ today: '2026-09-15', q: 'kitchen' }, 'quotes_newest'],
+  ])('quotes %j walk %s', (filter, index) => {
+    expectIndex(stores().quotes.page('ottery', filter, undefined, 51), index);
+    expectIndex(stores().quotes.page('ottery', filter, [1, 'x'], 51), index);
   });
 
   it('knows a scan and a sort when it sees them', () => {
