@@ -1,4 +1,4 @@
-import { addCharge, addRow, areaAmount, refuse, type UnitInHand } from './unit-in-hand';
+import { chargeByArea, refuse, type UnitInHand } from './unit-in-hand';
 import { type Rule } from './compile-list';
 
 /** The charges by area: glass, treatment, coating, assembly and gas. Percentages are taken on them. */
@@ -6,35 +6,35 @@ import { type Rule } from './compile-list';
 /** One row a lite. */
 export function chargeGlass(hand: UnitInHand): void {
   const { unit, list } = hand;
-  for (const [i, { glass }] of unit.lites.entries()) {
+  unit.lites.forEach(({ glass }, i) => {
     const rule = list.glass.get(glass);
     if (rule) addAreaCharge(hand, rule, i + 1);
     else refuse(hand, list.products.nameOf('glasses', glass), `/lites/${i}/glass`);
-  }
+  });
 }
 
 /** One row a treated lite, by treatment and nominal thickness. Glass left annealed costs nothing unless the list says so. */
 export function chargeTreatment(hand: UnitInHand): void {
   const { unit, list } = hand;
-  for (const [i, { glass, treatment }] of unit.lites.entries()) {
+  unit.lites.forEach(({ glass, treatment }, i) => {
     const item = list.products.glasses.get(glass);
     const rule = item && list.treatments.get(treatment)?.get(item.nominalMm);
     if (rule) addAreaCharge(hand, rule, i + 1);
     else if (item && list.products.treatments.get(treatment)?.kind !== 'annealed') {
       refuse(hand, `${list.products.nameOf('treatments', treatment)} ${item.name}`, `/lites/${i}/treatment`);
     }
-  }
+  });
 }
 
 /** One row a coated surface. */
 export function chargeCoating(hand: UnitInHand): void {
   const { unit, list } = hand;
-  for (const [i, { coating }] of unit.lites.entries()) {
-    if (!coating) continue;
+  unit.lites.forEach(({ coating }, i) => {
+    if (!coating) return;
     const rule = list.coatings.get(coating.id);
     if (rule) addAreaCharge(hand, rule, coating.surface);
     else refuse(hand, list.products.nameOf('coatings', coating.id), `/lites/${i}/coating/id`);
-  }
+  });
 }
 
 /** One row a cavity, at the rate of its number from outside. */
@@ -50,30 +50,16 @@ export function chargeAssembly(hand: UnitInHand): void {
 
 /** One row a cavity, not below the list's minimum for one cavity. */
 export function chargeGas(hand: UnitInHand): void {
-  const { unit, list, sheet } = hand;
+  const { unit, list } = hand;
   const only = unit.cavities.length === 1;
-  for (const [i, { gas }] of unit.cavities.entries()) {
+  unit.cavities.forEach(({ gas }, i) => {
     const rule = list.gases.get(gas);
-    if (!rule) {
-      refuse(hand, list.products.nameOf('gases', gas), `/cavities/${i}/gas`);
-      continue;
-    }
-    if (rule.free) continue;
-    const amount = areaAmount(hand, rule);
-    const label = rule.labels[only ? 0 : i + 1] ?? '';
-    if (rule.minimum && amount.listMinor === rule.minimum.minor) {
-      addRow(hand, 'gas', `${label}, minimum`, '1', 'cavity', rule.minimum.rate, amount, rule.id);
-    } else {
-      addCharge(hand, rule, label, amount, hand.size.areaText, list.measures.areaUnit);
-    }
-    sheet.areaMinor += amount.listMinor;
-  }
+    if (rule) addAreaCharge(hand, rule, only ? 0 : i + 1);
+    else refuse(hand, list.products.nameOf('gases', gas), `/cavities/${i}/gas`);
+  });
 }
 
-/** `place`: number of the lite, surface or cavity; 0 where there is but one. */
+/** Adds a charge by area to those that percentages are taken on. */
 function addAreaCharge(hand: UnitInHand, rule: Rule, place: number): void {
-  if (rule.free) return;
-  const amount = areaAmount(hand, rule);
-  addCharge(hand, rule, rule.labels[place] ?? '', amount, hand.size.areaText, hand.list.measures.areaUnit);
-  hand.sheet.areaMinor += amount.listMinor;
+  if (!rule.free) hand.sheet.areaMinor += chargeByArea(hand, rule, place);
 }

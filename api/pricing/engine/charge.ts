@@ -9,18 +9,18 @@ import { type Exact } from '@shared/money/exact';
  * is an amount of money and the rate a fraction (`0.06`).
  */
 export interface Charge {
-  family: RowFamily;
-  label: string;
-  quantity: string;
+  readonly family: RowFamily;
+  readonly label: string;
+  readonly quantity: string;
   /** what is counted: `ft²`, `m`, `cavity`, or a currency */
-  unit: string;
-  rate: string;
-  listMinor: number;
-  discountPercent: string;
-  discountReason: string | null;
-  netMinor: number;
+  readonly unit: string;
+  readonly rate: string;
+  readonly listMinor: number;
+  readonly discountPercent: string;
+  readonly discountReason: string | null;
+  readonly netMinor: number;
   /** version, part and entry of the list, such as `northmere.3/glass/clear-3`; or `contract/<id>`, `promotion/<id>` */
-  rule: string;
+  readonly rule: string;
 }
 
 /** What the charges of one unit are written on, in the order of the families. */

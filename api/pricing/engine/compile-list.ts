@@ -9,6 +9,8 @@ import { indexProducts, type Products } from './index-products';
 
 /** One rate of a list, ready to multiply. */
 export interface Rule {
+  /** among the rules of its list, from 0 */
+  number: number;
   family: UnitFamily;
   rate: string;
   /** minor units for one part of the basis: see `Measures` for the parts of an area and a length */
@@ -32,6 +34,8 @@ export interface QuantityBreak {
   atLeast: number;
   /** 0.03 for 3 % */
   part: Exact;
+  /** as its row says it, -0.03 */
+  rate: string;
   label: string;
   id: string;
 }
@@ -62,8 +66,7 @@ export interface CompiledList extends SizeRules {
   quantityBreaks: readonly QuantityBreak[];
   /** a weight band or a delivery by weight */
   asksForWeight: boolean;
-  /** a charge per line, whose share for one unit hangs on the quantity itself */
-  sharesByQuantity: boolean;
+  ruleCount: number;
 }
 
 const compiled = new WeakMap<PriceListContent, { for: CompiledList; catalogue: Catalogue }>();
@@ -88,9 +91,10 @@ function compile({ version, name, content }: PriceListVersion, catalogue: Catalo
   const minorPer = new Exact(10).pow(minorDigits[content.currency]);
   const { perArea, perLength } = measures;
 
+  let ruleCount = 0;
   const rule = (family: UnitFamily, rate: string, scale: Exact, entry: string, labels: readonly string[]): Rule => {
     const factor = exact(rate).times(minorPer).times(scale);
-    return { family, rate, factor, minimum: null, free: factor.isZero(), id: `${version}/${entry}`, labels };
+    return { number: ruleCount++, family, rate, factor, minimum: null, free: factor.isZero(), id: `${version}/${entry}`, labels };
   };
   const one = new Exact(1);
 
@@ -102,7 +106,7 @@ function compile({ version, name, content }: PriceListVersion, catalogue: Catalo
     treatments.set(treatment, byThickness);
   }
 
-  return {
+  const rules = {
     version,
     name,
     content,
@@ -166,18 +170,17 @@ function compile({ version, name, content }: PriceListVersion, catalogue: Catalo
     tiers: compileTiers(content),
     ...compileSizeCharges(content, measures, minorPer, version),
     quantityBreaks: content.quantityBreaks
-      .map(({ atLeast, percent }) => ({
-        atLeast,
-        part: exact(percent).dividedBy(100),
-        label: `${atLeast} or more, ${percent} %`,
-        id: `${version}/quantityBreaks/${atLeast}`,
-      }))
+      .map(({ atLeast, percent }) => {
+        const part = exact(percent).dividedBy(100);
+        const label = `${atLeast} or more, ${percent} %`;
+        return { atLeast, part, rate: part.negated().toString(), label, id: `${version}/quantityBreaks/${atLeast}` };
+      })
       .sort((a, b) => b.atLeast - a.atLeast),
-    sharesByQuantity: content.extras.some(({ per }) => per === 'line'),
     asksForWeight:
       content.sizeCharges.bands.some(({ kind }) => kind === 'weight') ||
       content.orderCharges.delivery.some(({ perWeight }) => !exact(perWeight).isZero()),
   };
+  return { ...rules, ruleCount };
 }
 
 const most = { lite: 4, surface: 8, cavity: 3 };

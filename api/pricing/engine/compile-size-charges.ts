@@ -33,9 +33,9 @@ export interface SizeRules {
   bands: readonly { kind: BandKind; bands: readonly BandRule[] }[];
 }
 
-/** One text for one size, whatever zeros it was written with. Takes mm. */
-export function sizeKey(width: Exact, height: Exact): string {
-  return `${width.toString()}x${height.toString()}`;
+/** One text for one size: sides in mm, written without needless zeros. */
+export function sizeKey(width: string, height: string): string {
+  return `${width}x${height}`;
 }
 
 /** Compiles what shape and size add, thresholds and standard sizes in exact mm, mm² and kg. */
@@ -73,7 +73,9 @@ export function compileSizeCharges(content: PriceListContent, measures: Measures
       content.shapes.map((entry) => [entry.shape, surcharge('shape', entry.shape.replace('-', ' '), entry, `shapes/${entry.shape}`)]),
     ),
     nonStandard: nonStandard && surcharge('size', 'non-standard size', nonStandard, 'sizeCharges/nonStandard'),
-    standardSizes: new Set(content.standardSizes.map(({ width, height }) => sizeKey(exact(width).times(mm), exact(height).times(mm)))),
+    standardSizes: new Set(
+      content.standardSizes.map(({ width, height }) => sizeKey(exact(width).times(mm).toString(), exact(height).times(mm).toString())),
+    ),
     bands: bandKinds
       .map((kind) => ({
         kind,

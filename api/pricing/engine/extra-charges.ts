@@ -1,7 +1,7 @@
 import { Exact } from '@shared/money/exact';
 import { decimalText, wholeMinor } from './charge';
 import { type ExtraRule } from './compile-list';
-import { addCharge, netOf, refuse, type UnitInHand } from './unit-in-hand';
+import { addRow, refuse, type UnitInHand } from './unit-in-hand';
 
 /**
  * Extras in the order of the list: those of open capillary tubes, those on everything, and those
@@ -34,7 +34,6 @@ function addExtra(hand: UnitInHand, rule: ExtraRule, counted: number, what: stri
   if (rule.free) return;
   const [times, unit] = rule.per === 'cavity' ? [new Exact(counted), what] : rule.per === 'unit' ? [new Exact(1), 'unit'] : [null, 'line'];
   const listMinor = wholeMinor(times ? rule.factor.times(times) : rule.factor.dividedBy(hand.quantity));
-  const netMinor = netOf(listMinor, hand.terms.discounts.extras.keeps);
   const quantity = decimalText(times ?? new Exact(1).dividedBy(hand.quantity));
-  addCharge(hand, rule, rule.labels[0] ?? '', { listMinor, netMinor }, quantity, unit);
+  addRow(hand, 'extras', rule.labels[0] ?? '', quantity, unit, rule.rate, listMinor, rule.id);
 }

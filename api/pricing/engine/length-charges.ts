@@ -1,4 +1,4 @@
-import { addCharge, netOf, perimeterAmount, refuse, type UnitInHand, wholeQuotient } from './unit-in-hand';
+import { addRow, chargeByPerimeter, refuse, type UnitInHand, wholeQuotient } from './unit-in-hand';
 import { type Rule } from './compile-list';
 import { decimalText, wholeMinor } from './charge';
 
@@ -8,11 +8,11 @@ import { decimalText, wholeMinor } from './charge';
 export function chargeSpacer(hand: UnitInHand): void {
   const { unit, list } = hand;
   const only = unit.cavities.length === 1;
-  for (const [i, { spacer }] of unit.cavities.entries()) {
+  unit.cavities.forEach(({ spacer }, i) => {
     const rule = list.spacers.get(spacer);
     if (rule) addPerimeterCharge(hand, rule, only ? 0 : i + 1);
     else refuse(hand, `${list.products.nameOf('spacers', spacer)} spacer`, `/cavities/${i}/spacer`);
-  }
+  });
 }
 
 /** The length of all bars, upright ones as long as the billed height, level ones as the billed width; and each crossing. */
@@ -34,22 +34,18 @@ export function chargeGrid(hand: UnitInHand): void {
 /** One row a lite whose edges are worked. */
 export function chargeEdgeWork(hand: UnitInHand): void {
   const { unit, list } = hand;
-  for (const [i, { edgeWork }] of unit.lites.entries()) {
-    if (edgeWork === undefined) continue;
+  unit.lites.forEach(({ edgeWork }, i) => {
+    if (edgeWork === undefined) return;
     const rule = list.edgeWork.get(edgeWork);
     if (rule) addPerimeterCharge(hand, rule, i + 1);
     else refuse(hand, `${list.products.nameOf('edgeWork', edgeWork)} edges`, `/lites/${i}/edgeWork`);
-  }
+  });
 }
 
 function addPerimeterCharge(hand: UnitInHand, rule: Rule, place: number): void {
-  if (rule.free) return;
-  const amount = perimeterAmount(hand, rule);
-  addCharge(hand, rule, rule.labels[place] ?? '', amount, hand.size.perimeterText, hand.list.measures.lengthUnit);
+  if (!rule.free) chargeByPerimeter(hand, rule, place);
 }
 
 function addGridCharge(hand: UnitInHand, rule: Rule, listMinor: number, quantity: string, unit: string): void {
-  if (rule.free) return;
-  const netMinor = netOf(listMinor, hand.terms.discounts.grid.keeps);
-  addCharge(hand, rule, rule.labels[0] ?? '', { listMinor, netMinor }, quantity, unit);
+  if (!rule.free) addRow(hand, 'grid', rule.labels[0] ?? '', quantity, unit, rule.rate, listMinor, rule.id);
 }

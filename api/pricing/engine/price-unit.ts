@@ -4,9 +4,8 @@ import { type PriceListVersion, type PriceTerms } from '@shared/contracts/price-
 import { type Unit } from '@shared/contracts/units';
 import { makeUpKey } from '@shared/glazing/make-up-key';
 import { type Currency } from '@shared/money/currencies';
-import { type Exact, exact } from '@shared/money/exact';
 import { chargeAssembly, chargeCoating, chargeGas, chargeGlass, chargeTreatment } from './area-charges';
-import { type BilledSize, billSteps, stepsOf } from './bill-size';
+import { billSide, type BilledSize, billSize, type Side } from './bill-size';
 import { type Charge, type Sheet } from './charge';
 import { type CompiledList, compileList } from './compile-list';
 import { type CompiledTerms, compileTerms } from './compile-terms';
@@ -51,33 +50,52 @@ export function priceUnit(line: LineToPrice, version: PriceListVersion, terms: P
   return priceCompiled(line, list, compileTerms(terms, list));
 }
 
+/** Sides and sizes billed before, for one list and one dealer's terms: what lines may share. */
+export interface BilledBefore {
+  sides: Map<string, Side>;
+  sizes: Map<string, BilledSize>;
+}
+
 /** As `priceUnit`, for a list and terms already compiled. */
-export function priceCompiled(line: LineToPrice, list: CompiledList, terms: CompiledTerms): UnitPricing {
-  const measured = measureLine(line, list);
-  if ('refusals' in measured) return measured;
-  const { width, height, weightKg } = measured;
-  const { increment } = list.measures;
-  const size = billSteps(stepsOf(width, increment), stepsOf(height, increment), list);
+export function priceCompiled(line: LineToPrice, list: CompiledList, terms: CompiledTerms, before?: BilledBefore): UnitPricing {
+  const weighed = weighLine(line, list);
+  if ('refusals' in weighed) return weighed;
+  const { weightKg } = weighed;
+  const width = sideOf(line.unit.width, list, before);
+  const height = sideOf(line.unit.height, list, before);
+  const size = sizeOf(width, height, list, before);
   return toLine(line, chargeUnit(line, size, sizeFactsOf(width, height, weightKg, list), list, terms), list, weightKg);
 }
 
-/** Rows and their sum, which is the unit price; or why the list does not price it. */
-export type UnitSheet = { charges: readonly Charge[]; unitPriceMinor: number } | { refusals: Reason[] };
-
-/** Actual size in mm, and the weight where the list asks for it. */
-export function measureLine(
-  line: LineToPrice,
-  list: CompiledList,
-): { width: Exact; height: Exact; weightKg: string | null } | { refusals: Reason[] } {
-  const width = exact(line.unit.width);
-  const height = exact(line.unit.height);
-  if (!list.asksForWeight || line.weightKg !== undefined) return { width, height, weightKg: line.weightKg ?? null };
-  const weighed = weighUnit(line.unit, list.products.catalogue);
-  return 'refusals' in weighed ? weighed : { width, height, weightKg: weighed.weightKg };
+function sideOf(text: string, list: CompiledList, before: BilledBefore | undefined): Side {
+  const known = before?.sides.get(text);
+  if (known) return known;
+  const side = billSide(text, list);
+  before?.sides.set(text, side);
+  return side;
 }
 
+function sizeOf(width: Side, height: Side, list: CompiledList, before: BilledBefore | undefined): BilledSize {
+  if (!before) return billSize(width.steps, height.steps, list);
+  const key = `${width.steps}x${height.steps}`;
+  const known = before.sizes.get(key);
+  if (known) return known;
+  const size = billSize(width.steps, height.steps, list);
+  before.sizes.set(key, size);
+  return size;
+}
+
+/** The weight of one unit where the list asks for it. */
+function weighLine(line: LineToPrice, list: CompiledList): { weightKg: string | null } | { refusals: Reason[] } {
+  if (!list.asksForWeight || line.weightKg !== undefined) return { weightKg: line.weightKg ?? null };
+  return weighUnit(line.unit, list.products.catalogue);
+}
+
+/** Rows and their sum, which is the unit price; or why the list does not price it. */
+type UnitSheet = { charges: readonly Charge[]; unitPriceMinor: number } | { refusals: Reason[] };
+
 /** All rows of one unit in their order: list charges, net rate, quantity break, promotion. */
-export function chargeUnit(line: LineToPrice, size: BilledSize, facts: SizeFacts, list: CompiledList, terms: CompiledTerms): UnitSheet {
+function chargeUnit(line: LineToPrice, size: BilledSize, facts: SizeFacts, list: CompiledList, terms: CompiledTerms): UnitSheet {
   const { unit, quantity, extras = [] } = line;
   const sheet: Sheet = { charges: [], refusals: [], areaMinor: 0 };
   const hand: UnitInHand = { unit, quantity, extras, size, list, terms, sheet };
@@ -111,7 +129,7 @@ export function chargeUnit(line: LineToPrice, size: BilledSize, facts: SizeFacts
 }
 
 /** A line of so many units of a sheet. */
-export function toLine(line: LineToPrice, sheet: UnitSheet, { currency }: CompiledList, weightKg: string | null): UnitPricing {
+function toLine(line: LineToPrice, sheet: UnitSheet, { currency }: CompiledList, weightKg: string | null): UnitPricing {
   if ('refusals' in sheet) return sheet;
   const { charges, unitPriceMinor } = sheet;
   const linePriceMinor = unitPriceMinor * line.quantity;

@@ -37,9 +37,9 @@ export function quantityBreakOf(quantity: number, list: CompiledList): QuantityB
 }
 
 /** The row of the quantity break, on the net unit price so far. */
-export function quantityBreakRow(netMinor: number, { part, label, id }: QuantityBreak, list: CompiledList): Charge | undefined {
+export function quantityBreakRow(netMinor: number, { part, rate, label, id }: QuantityBreak, list: CompiledList): Charge | undefined {
   if (part.isZero()) return undefined;
-  return reduction('quantity break', label, amountOf(netMinor, list.currency), list, part, -partOf(netMinor, part), id);
+  return reduction('quantity break', label, amountOf(netMinor, list.currency), list, rate, -partOf(netMinor, part), id);
 }
 
 /**
@@ -73,7 +73,15 @@ function rowOf(
 ): Charge | undefined {
   const id = `promotion/${promotion.id}`;
   if ('all' in parts) {
-    return reduction('promotion', label, amountOf(netMinor, list.currency), list, parts.all, -partOf(netMinor, parts.all), id);
+    return reduction(
+      'promotion',
+      label,
+      amountOf(netMinor, list.currency),
+      list,
+      decimalText(parts.all.negated()),
+      -partOf(netMinor, parts.all),
+      id,
+    );
   }
   const left = new Exact(1).minus(broken?.part ?? 0);
   let base = new Exact(0);
@@ -87,7 +95,7 @@ function rowOf(
   }
   if (base.isZero()) return undefined;
   const quantity = decimalText(base.dividedBy(list.minorPer));
-  return reduction('promotion', label, quantity, list, taken.dividedBy(base), -wholeMinor(taken), id);
+  return reduction('promotion', label, quantity, list, decimalText(taken.dividedBy(base).negated()), -wholeMinor(taken), id);
 }
 
 function reduction(
@@ -95,7 +103,7 @@ function reduction(
   label: string,
   quantity: string,
   { currency }: CompiledList,
-  part: Exact,
+  rate: string,
   netMinor: number,
   rule: string,
 ): Charge {
@@ -104,7 +112,7 @@ function reduction(
     label,
     quantity,
     unit: currency,
-    rate: decimalText(part.negated()),
+    rate,
     listMinor: 0,
     discountPercent: '0',
     discountReason: null,

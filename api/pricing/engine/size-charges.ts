@@ -1,9 +1,10 @@
 import { amountOf } from '@shared/money/money';
 import { type Exact, exact } from '@shared/money/exact';
+import { type Side } from './bill-size';
 import { partOf } from './charge';
 import { type CompiledList } from './compile-list';
 import { type BandKind, type BandRule, sizeKey, type SurchargeRule } from './compile-size-charges';
-import { addRow, netOf, refuse, type UnitInHand } from './unit-in-hand';
+import { addRow, refuse, type UnitInHand } from './unit-in-hand';
 
 /** What shape and size add: percentages of the area charges at list, and fixed charges. */
 
@@ -15,25 +16,32 @@ export interface SizeFacts {
 }
 
 /**
- * Which size charges a unit of `width` × `height` mm meets. The size is that of the bounding
- * rectangle as ordered, not as billed; a standard size is met as listed, width × height, and not
- * turned. `Above` is strict. `weightKg` may be null only where
- * the list has no weight bands.
+ * Which size charges a unit meets. The size is that of the bounding rectangle as ordered, not as
+ * billed; a standard size is met as listed, width × height, and not turned. `Above` is strict.
+ * `weightKg` may be null only where the list has no weight bands.
  */
-export function sizeFactsOf(width: Exact, height: Exact, weightKg: string | null, list: CompiledList): SizeFacts {
-  const measureOf: Record<BandKind, () => Exact> = {
-    united: () => width.plus(height),
-    'long edge': () => (width.greaterThan(height) ? width : height),
-    area: () => width.times(height),
-    weight: () => exact(weightKg ?? '0'),
-  };
+export function sizeFactsOf(width: Side, height: Side, weightKg: string | null, list: CompiledList): SizeFacts {
   const bands: BandRule[] = [];
   for (const { kind, bands: ofKind } of list.bands) {
-    const actual = measureOf[kind]();
+    const actual = measureOf(kind, width.mm, height.mm, weightKg);
     const highest = ofKind.find(({ above }) => actual.greaterThan(above));
     if (highest) bands.push(highest);
   }
-  return { standard: list.standardSizes.has(sizeKey(width, height)), bands };
+  return { standard: list.standardSizes.has(sizeKey(width.text, height.text)), bands };
+}
+
+/** mm, mm² or kg. */
+function measureOf(kind: BandKind, width: Exact, height: Exact, weightKg: string | null): Exact {
+  switch (kind) {
+    case 'united':
+      return width.plus(height);
+    case 'long edge':
+      return width.greaterThan(height) ? width : height;
+    case 'area':
+      return width.times(height);
+    case 'weight':
+      return exact(weightKg ?? '0');
+  }
 }
 
 /** A rectangle costs nothing more unless the list says so; any other shape needs its rate. */
@@ -52,16 +60,19 @@ export function chargeSize(hand: UnitInHand, { standard, bands }: SizeFacts): vo
 
 /** One row for the percentage, one for the fixed charge. */
 function addSurcharge(hand: UnitInHand, rule: SurchargeRule): void {
-  const { keeps } = hand.terms.discounts[rule.family];
   if (rule.part) {
     const { areaMinor } = hand.sheet;
     const { currency } = hand.list;
-    const listMinor = partOf(areaMinor, rule.part);
-    const amount = { listMinor, netMinor: netOf(listMinor, keeps) };
-    addRow(hand, rule.family, rule.percentLabel, amountOf(areaMinor, currency), currency, rule.partText, amount, rule.id);
+    addRow(
+      hand,
+      rule.family,
+      rule.percentLabel,
+      amountOf(areaMinor, currency),
+      currency,
+      rule.partText,
+      partOf(areaMinor, rule.part),
+      rule.id,
+    );
   }
-  if (rule.fixedMinor > 0) {
-    const amount = { listMinor: rule.fixedMinor, netMinor: netOf(rule.fixedMinor, keeps) };
-    addRow(hand, rule.family, rule.fixedLabel, '1', 'unit', rule.fixed, amount, rule.id);
-  }
+  if (rule.fixedMinor > 0) addRow(hand, rule.family, rule.fixedLabel, '1', 'unit', rule.fixed, rule.fixedMinor, rule.id);
 }

@@ -2,8 +2,8 @@ import { type Reason } from '@shared/contracts/evaluation';
 import { type UnitFamily } from '@shared/contracts/price-lists';
 import { type Unit } from '@shared/contracts/units';
 import { type Exact } from '@shared/money/exact';
-import { type Amount, type BilledSize } from './bill-size';
-import { type Sheet, wholeMinor } from './charge';
+import { type BilledSize, type RatedCharge } from './bill-size';
+import { type Charge, type Sheet, wholeMinor } from './charge';
 import { type CompiledList, type Rule } from './compile-list';
 import { type CompiledTerms } from './compile-terms';
 import { type Divisor } from './measures';
@@ -25,24 +25,54 @@ export function netOf(listMinor: number, keeps: Exact | null): number {
   return keeps === null ? listMinor : wholeMinor(keeps.times(listMinor));
 }
 
-/** List and net amount of an area rate at the billed area, not below the rate's minimum. */
-export function areaAmount(hand: UnitInHand, rule: Rule): Amount {
-  return amountOf(hand, rule, hand.size.areaParts, hand.list.measures.areaDivisor);
+/**
+ * Charges a rate at the billed area, not below the rate's minimum, and writes its row.
+ *
+ * @param place number of the lite, surface or cavity; 0 where there is but one
+ * @returns the list amount
+ */
+export function chargeByArea(hand: UnitInHand, rule: Rule, place: number): number {
+  const { size, list } = hand;
+  const made = size.charged[rule.number] ?? rated(hand, rule, size.areaParts, list.measures.areaDivisor);
+  const { minimum } = rule;
+  const label = rule.labels[place] ?? '';
+  hand.sheet.charges.push(
+    (made.rows[place] ??=
+      minimum?.minor === made.listMinor
+        ? rowOf(hand, rule.family, `${label}, minimum`, '1', 'cavity', minimum.rate, made, rule.id)
+        : rowOf(hand, rule.family, label, size.areaText, list.measures.areaUnit, rule.rate, made, rule.id)),
+  );
+  return made.listMinor;
 }
 
-/** List and net amount of a length rate at the billed perimeter. */
-export function perimeterAmount(hand: UnitInHand, rule: Rule): Amount {
-  return amountOf(hand, rule, hand.size.perimeterParts, hand.list.measures.lengthDivisor);
+/** Charges a rate at the billed perimeter and writes its row; `place` as in `chargeByArea`. */
+export function chargeByPerimeter(hand: UnitInHand, rule: Rule, place: number): void {
+  const { size, list } = hand;
+  const made = size.charged[rule.number] ?? rated(hand, rule, size.perimeterParts, list.measures.lengthDivisor);
+  const label = rule.labels[place] ?? '';
+  const row = (made.rows[place] ??= rowOf(
+    hand,
+    rule.family,
+    label,
+    size.perimeterText,
+    list.measures.lengthUnit,
+    rule.rate,
+    made,
+    rule.id,
+  ));
+  hand.sheet.charges.push(row);
 }
 
-function amountOf({ size, terms }: UnitInHand, rule: Rule, parts: Exact, divisor: Divisor | null): Amount {
-  const made = size.amounts.get(rule);
-  if (made) return made;
-  const rated = wholeQuotient(parts.times(rule.factor), divisor);
-  const listMinor = rule.minimum ? Math.max(rated, rule.minimum.minor) : rated;
-  const amount = { listMinor, netMinor: netOf(listMinor, terms.discounts[rule.family].keeps) };
-  size.amounts.set(rule, amount);
-  return amount;
+function rated({ size, terms }: UnitInHand, rule: Rule, parts: Exact, divisor: Divisor | null): RatedCharge {
+  const amount = wholeQuotient(parts.times(rule.factor), divisor);
+  const listMinor = rule.minimum ? Math.max(amount, rule.minimum.minor) : amount;
+  const made: RatedCharge = {
+    listMinor,
+    netMinor: netOf(listMinor, terms.discounts[rule.family].keeps),
+    rows: new Array<undefined>(rule.labels.length),
+  };
+  size.charged[rule.number] = made;
+  return made;
 }
 
 /** A positive amount divided and rounded half up in one step, so that no cut quotient is ever rounded. */
@@ -53,24 +83,33 @@ export function wholeQuotient(amount: Exact, divisor: Divisor | null): number {
   return whole;
 }
 
-/** Writes the row of a rate. */
-export function addCharge(hand: UnitInHand, rule: Rule, label: string, amount: Amount, quantity: string, unit: string): void {
-  addRow(hand, rule.family, label, quantity, unit, rule.rate, amount, rule.id);
-}
-
-/** Writes one row of a unit family. */
+/** Writes one row of a unit family, discounted as the terms have it. */
 export function addRow(
-  { sheet, terms }: UnitInHand,
+  hand: UnitInHand,
   family: UnitFamily,
   label: string,
   quantity: string,
   unit: string,
   rate: string,
-  { listMinor, netMinor }: Amount,
+  listMinor: number,
   rule: string,
 ): void {
+  const netMinor = netOf(listMinor, hand.terms.discounts[family].keeps);
+  hand.sheet.charges.push(rowOf(hand, family, label, quantity, unit, rate, { listMinor, netMinor }, rule));
+}
+
+function rowOf(
+  { terms }: UnitInHand,
+  family: UnitFamily,
+  label: string,
+  quantity: string,
+  unit: string,
+  rate: string,
+  { listMinor, netMinor }: Pick<Charge, 'listMinor' | 'netMinor'>,
+  rule: string,
+): Charge {
   const { percent, reason } = terms.discounts[family];
-  sheet.charges.push({ family, label, quantity, unit, rate, listMinor, discountPercent: percent, discountReason: reason, netMinor, rule });
+  return { family, label, quantity, unit, rate, listMinor, discountPercent: percent, discountReason: reason, netMinor, rule };
 }
 
 /** Refuses a product that the list has no rate for: a list never prices at nothing. */
