@@ -13,6 +13,7 @@ export default {
   projects: [
     {
       displayName: 'server',
+      testTimeout: 60_000,
       testEnvironment: 'node',
       testMatch: ['<rootDir>/{shared,api,seeds}/**/*.spec.ts', '<rootDir>/test/{api,outside,house}/**/*.spec.ts'],
       transform: serverTransform,

@@ -86,6 +86,9 @@ function send(response: Response, { endpoint }: Route, answer: unknown): void {
 
 const demandJson: RequestHandler = (request, _response, next) => {
   const hasBody = request.headers['transfer-encoding'] !== undefined || Number(request.headers['content-length'] ?? 0) > 0;
+  const charset = /charset\s*=\s*"?([^\s;"]+)/i.exec(request.get('content-type') ?? '')?.[1];
+  // JSON between systems is UTF-8 (RFC 8259, section 8.1); what reads other charsets reads UTF-7 too.
+  if (charset && charset.toLowerCase() !== 'utf-8') throw new Refusal('wrong-media-type', 'Send JSON in UTF-8.');
   if (hasBody && !request.is('application/json')) throw new Refusal('wrong-media-type', 'Send application/json.');
   next();
 };
