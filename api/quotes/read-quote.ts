@@ -3,6 +3,7 @@ import { money } from '@shared/money/money';
 import { type Member } from '../companies/actor';
 import { type Dependencies } from '../dependencies';
 import { type Input } from '../http/serve';
+import { earliestDayOf } from '../orders/earliest-day';
 import { type OutboxMail } from '../mail/outbox-store';
 import { findQuote, stateOf, todayOf } from './quote-life';
 import { type QuoteLineRow, type QuoteListRow } from './quote-store';
@@ -31,6 +32,7 @@ export function readQuote(
     pricedAt: new Date(quote.pricedAt).toISOString(),
     shipTo: quote.shipToId,
     leadTimeDays: quote.leadTimeDays,
+    earliestOn: earliestDayOf(quote.fabricatorId, quote.leadTimeClass, { stores, clock }),
     lines: lines.map(({ onWire }) => onWire),
     ...quote.totals,
     retailGoods: money(retailGoodsMinor, quote.currency),

@@ -56,6 +56,7 @@ export const quoteSchema = z
     pricedAt: instant,
     shipTo: id.nullable(),
     leadTimeDays: z.int().nullable(),
+    earliestOn: day.meta({ description: 'the first day on which an order placed now can be ready' }),
     lines: z.array(quoteLine),
     ...totalsSchema.shape,
     retailGoods: moneySchema,

@@ -46,6 +46,7 @@ export function quoteFactory(overrides: Partial<Quote> = {}): Quote {
     pricedAt: '2026-03-05T10:00:00.000Z',
     shipTo: null,
     leadTimeDays: 8,
+    earliestOn: '2026-03-17',
     lines: ['a', 'b', 'c'].map((id, position) => lineFactory({ id, position })),
     goods: usd('3316.14'),
     orderCharges: [],

@@ -37,6 +37,7 @@ function quote(id: string, tradeAccount: string, lines: number, state: Quote['st
     pricedAt: '2026-09-15T15:00:00Z',
     shipTo: null,
     leadTimeDays: 8,
+    earliestOn: '2026-03-17',
     lines: Array.from({ length: lines }, (_, i) => ({
       ...priced!,
       id: `line-${i + 1}`,

@@ -1,4 +1,4 @@
-import { ChangeDetectionStrategy, Component, computed, effect, inject, input, signal } from '@angular/core';
+import { ChangeDetectionStrategy, Component, computed, effect, inject, input, signal, untracked } from '@angular/core';
 import { toSignal } from '@angular/core/rxjs-interop';
 import { type FormControl, NonNullableFormBuilder, ReactiveFormsModule, Validators } from '@angular/forms';
 import { MatButton } from '@angular/material/button';
@@ -89,7 +89,10 @@ export class DetailsForm {
   protected readonly earliest = computed(() => dayIn(this.timeZone, Date.now()));
 
   constructor() {
-    effect(() => this.takeOver(valuesOf(this.quote())));
+    effect(() => {
+      const saved = valuesOf(this.quote());
+      untracked(() => this.takeOver(saved));
+    });
     effect(() => {
       if (this.quote().state === 'ordered') this.form.disable({ emitEvent: false });
     });

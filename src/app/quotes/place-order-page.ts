@@ -1,11 +1,10 @@
-import { ChangeDetectionStrategy, Component, computed, effect, inject, input, signal } from '@angular/core';
+import { ChangeDetectionStrategy, Component, computed, effect, inject, input, signal, untracked } from '@angular/core';
 import { toSignal } from '@angular/core/rxjs-interop';
 import { NonNullableFormBuilder, ReactiveFormsModule, Validators } from '@angular/forms';
 import { MatButton } from '@angular/material/button';
 import { MatFormFieldModule } from '@angular/material/form-field';
 import { MatInput } from '@angular/material/input';
 import { Router, RouterLink } from '@angular/router';
-import { dayIn } from '@shared/calendar/days';
 import { termsText } from '@shared/calendar/terms';
 import { moneySchema } from '@shared/contracts/primitives';
 import { listAddresses, listTradeAccounts, readCredit } from '@shared/contracts/trade-accounts';
@@ -13,7 +12,6 @@ import { type Money } from '@shared/money/money';
 import { ApiClient } from '../api-client/api-client';
 import { loaded } from '../api-client/loaded';
 import { type ProblemError } from '../api-client/problem-error';
-import { Session } from '../session/session';
 import { CreditBar } from '../ui/credit-bar';
 import { DayPipe } from '../ui/date-pipes';
 import { showAtFields } from '../ui/field-problems';
@@ -52,7 +50,6 @@ export class PlaceOrderPage {
   readonly id = input.required<string>();
   private readonly api = inject(ApiClient);
   private readonly router = inject(Router);
-  private readonly company = inject(Session).user()?.company;
   protected readonly quotes = inject(QuoteDesk);
   protected readonly orders = inject(OrderDesk);
   protected readonly quote = this.quotes.quote;
@@ -78,9 +75,9 @@ export class PlaceOrderPage {
   /** Totals on the screen are for the address on the screen. */
   protected readonly priced = computed(() => !this.quotes.saving() && this.quote()?.shipTo === this.shipTo());
   protected readonly shipToProblem = signal<ProblemError | null>(null);
-  protected readonly today = dayIn(this.company?.timeZone ?? 'UTC', Date.now());
-  /** The maker's calendar decides; it is told when a day does not do. */
-  protected readonly earliest = signal('');
+  /** The maker's calendar decides; its answer to a day that does not do is the newest. */
+  private readonly refusedUntil = signal('');
+  protected readonly earliest = computed(() => this.refusedUntil() || (this.quote()?.earliestOn ?? ''));
 
   protected readonly changedPrice = computed(() => {
     const problem = this.orders.problem();
@@ -97,7 +94,10 @@ export class PlaceOrderPage {
   constructor() {
     effect(() => this.quotes.use(this.id()));
     effect(() => this.takeFirstAddress());
-    effect(() => this.showProblem(this.orders.problem()));
+    effect(() => {
+      const problem = this.orders.problem();
+      untracked(() => this.showProblem(problem));
+    });
     effect(() => {
       const order = this.orders.placed();
       if (order) void this.router.navigate(['/orders', order.id], { replaceUrl: true, state: { placed: true } });
@@ -131,14 +131,14 @@ export class PlaceOrderPage {
     const first = addresses?.find(({ id }) => id === quote?.shipTo) ?? addresses?.[0];
     if (!quote || !first || this.form.controls.shipTo.value !== '') return;
     this.form.controls.shipTo.setValue(first.id);
-    if (quote.shipTo !== first.id && quote.state === 'open') void this.priceFor(first.id);
+    if (quote.shipTo !== first.id && quote.state === 'open') untracked(() => void this.priceFor(first.id));
   }
 
   private showProblem(problem: ProblemError | null): void {
     const { poNumber, requiredOn, shipTo } = this.form.controls;
     const placed = problem !== null && showAtFields(problem, { '/poNumber': poNumber, '/requiredOn': requiredOn, '/shipTo': shipTo });
     const earliest = problem?.problem['earliest'];
-    if (typeof earliest === 'string') this.earliest.set(earliest);
+    if (typeof earliest === 'string') this.refusedUntil.set(earliest);
     const shownElsewhere = problem !== null && (placed || problem.code === 'price-changed' || reviewable.includes(problem.code));
     this.otherProblem.set(shownElsewhere ? null : problem);
   }

@@ -23,7 +23,7 @@ const ASK_AGAIN_MS = 2500;
 @Component({
   selector: 'app-quote-page',
   imports: [MatButton, RouterLink, DayPipe, InstantPipe, Icon, MoneyPipe, ProblemNote, StateMark, TotalsTable, DetailsForm, QuoteLines],
-  providers: [QuoteDesk],
+  providers: [QuoteDesk, DayPipe, InstantPipe],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './quote-page.html',
   styleUrl: './quote-page.scss',
@@ -37,10 +37,28 @@ export class QuotePage implements HoldsWork {
   private readonly asker = inject(Asker);
   private readonly announcer = inject(LiveAnnouncer);
   private readonly title = inject(Title);
+  private readonly instants = inject(InstantPipe);
+  private readonly days = inject(DayPipe);
   private readonly details = viewChild(DetailsForm);
   protected readonly address = filterAddress();
   protected readonly quote = this.desk.quote;
   protected readonly hasMarkUp = computed(() => /[1-9]/.test(this.quote()?.markUpPercent ?? ''));
+
+  protected readonly about = computed(() => {
+    const quote = this.quote();
+    if (!quote) return '';
+    const { fabricator, units, customer, createdBy, createdAt } = quote;
+    const whom = customer ? `, for ${customer.name}` : '';
+    return `${fabricator.name}, ${units} ${units === 1 ? 'unit' : 'units'}${whom}, by ${createdBy} on ${this.instants.transform(createdAt)}`;
+  });
+  protected readonly held = computed(() => {
+    const quote = this.quote();
+    if (!quote) return '';
+    const { state, priceList, priceListVersion, pricedAt, validUntil } = quote;
+    const until = state === 'open' ? ` and held until ${this.days.transform(validUntil)}` : '';
+    const since = this.instants.transform(priceList.effectiveFrom);
+    return `Prices of ${priceList.name} (version ${priceListVersion}), in force since ${since}, taken ${this.instants.transform(pricedAt)}${until}.`;
+  });
 
   constructor() {
     effect(() => this.desk.use(this.id()));

@@ -35,7 +35,7 @@ import { StateMark } from '../ui/state-mark';
   ],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './quotes-page.html',
-  styleUrl: '../ui/work-table.scss',
+  styleUrls: ['../ui/work-table.scss', './quotes-page.scss'],
 })
 export class QuotesPage {
   readonly q = input<string>();
