@@ -21,7 +21,7 @@ import { SearchField } from '../ui/search-field';
   imports: [MatButton, MatFormFieldModule, MatInput, MatTableModule, DayPipe, ListFooter, ProblemNote, SearchField],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './market-page.html',
-  styleUrl: '../ui/work-table.scss',
+  styleUrls: ['../ui/work-table.scss', './market-page.scss'],
 })
 export class MarketPage {
   readonly q = input<string>();

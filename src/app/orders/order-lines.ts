@@ -1,5 +1,4 @@
 import { ChangeDetectionStrategy, Component, computed, inject, input, model } from '@angular/core';
-import { MatIconButton } from '@angular/material/button';
 import { MatTableModule } from '@angular/material/table';
 import { type Order, type OrderLine } from '@shared/contracts/orders';
 import { Session } from '../session/session';
@@ -12,7 +11,7 @@ import { UnitThumb } from '../ui/unit-thumb';
 /** The lines of an order, each of which opens to its drawings and charge sheet. */
 @Component({
   selector: 'app-order-lines',
-  imports: [MatIconButton, MatTableModule, Icon, LineSheet, MoneyPipe, SizePipe, UnitThumb],
+  imports: [MatTableModule, Icon, LineSheet, MoneyPipe, SizePipe, UnitThumb],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './order-lines.html',
   styleUrls: ['../ui/work-table.scss', './order-lines.scss'],

@@ -36,7 +36,7 @@ import { isLate } from './is-late';
   ],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './orders-page.html',
-  styleUrl: '../ui/work-table.scss',
+  styleUrls: ['../ui/work-table.scss', './orders-page.scss'],
 })
 export class OrdersPage {
   readonly q = input<string>();

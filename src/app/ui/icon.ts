@@ -15,6 +15,13 @@ import { type IconName, icons } from './icons';
       vertical-align: -0.3em;
       flex: none;
     }
+    /* In a round button it stands in the middle, not on a line of text. */
+    :host-context(.mat-mdc-icon-button) {
+      display: block;
+      width: 22px;
+      height: 22px;
+      margin: auto;
+    }
     :host ::ng-deep svg {
       width: 100%;
       height: 100%;

@@ -1,5 +1,4 @@
 import { ChangeDetectionStrategy, Component, computed, inject, input, output } from '@angular/core';
-import { MatButton } from '@angular/material/button';
 import { type Hint, type PricedLine } from '@shared/contracts/prices';
 import { type Unit } from '@shared/contracts/units';
 import { elevation } from '@shared/drawings/elevation';
@@ -27,7 +26,7 @@ type ShownLine = Pick<PricedLine, 'charges' | 'unitPrice' | 'linePrice'> & {
 /** An opened line: both drawings of its unit to scale, and its charge sheet row by row. */
 @Component({
   selector: 'app-line-sheet',
-  imports: [ChargeSheet, Drawing, MatButton, MoneyPipe, ProblemNote, SizePipe],
+  imports: [ChargeSheet, Drawing, MoneyPipe, ProblemNote, SizePipe],
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
     <div class="unit">
@@ -56,7 +55,7 @@ type ShownLine = Pick<PricedLine, 'charges' | 'unitPrice' | 'linePrice'> & {
             <b>{{ hint | size }}</b> is billed one step less: saves {{ hint.saves | money }} each.
           }
           @if (editable()) {
-            <button matButton type="button" (click)="resized.emit(hint)">Use this size</button>
+            <button type="button" (click)="resized.emit(hint)">Use this size</button>
           }
         </p>
       }
@@ -78,6 +77,19 @@ type ShownLine = Pick<PricedLine, 'charges' | 'unitPrice' | 'linePrice'> & {
     .hint {
       margin-top: 6px;
       color: var(--sy-soft);
+    }
+    .hint button {
+      min-height: 24px;
+      padding: 0 2px;
+      border: 0;
+      background: none;
+      color: var(--sy-copper);
+      font: inherit;
+      font-weight: 700;
+      cursor: pointer;
+    }
+    .hint button:hover {
+      text-decoration: underline;
     }
     b {
       color: var(--sy-ink);

@@ -45,6 +45,7 @@ const marks: Record<MarkedState, { icon: IconName; tone: Tone }> = {
       display: inline-flex;
       align-items: center;
       gap: 5px;
+      vertical-align: middle;
       white-space: nowrap;
       color: var(--sy-ink);
     }

@@ -22,14 +22,14 @@ import { MoneyPipe } from './money-pipe';
         </tr>
         @for (charge of totals().orderCharges; track $index) {
           <tr>
-            <th scope="row">{{ charge.label }}</th>
+            <th scope="row">{{ capital(charge.label) }}</th>
             <td>{{ charge.net | money: 'bare' }}</td>
           </tr>
         }
         @for (row of totals().tax; track $index) {
           <tr>
             <th scope="row">
-              {{ row.label }}, {{ row.rate }} %<small>of {{ row.base | money: 'bare' }}</small>
+              {{ capital(row.label) }}, {{ row.rate }} %<small>of {{ row.base | money: 'bare' }}</small>
             </th>
             <td>{{ row.amount | money: 'bare' }}</td>
           </tr>
@@ -101,4 +101,9 @@ export class TotalsTable {
   readonly retail = input<Money>();
   /** words for a total without tax, such as `No tax, exempt` */
   readonly noTax = input<string>();
+
+  /** Labels come as they stand within a sentence. */
+  protected capital(label: string): string {
+    return label.charAt(0).toUpperCase() + label.slice(1);
+  }
 }
