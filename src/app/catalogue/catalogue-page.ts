@@ -2,10 +2,10 @@ import { ChangeDetectionStrategy, Component, computed, input } from '@angular/co
 import { RouterLink } from '@angular/router';
 import { type Catalogue } from '@shared/contracts/catalogue';
 import { catalogueParts } from '@shared/contracts/catalogue-parts';
+import { cataloguePicture } from '@shared/drawings/catalogue-pictures';
 import { Drawing } from '../ui/drawing/drawing';
 import { CatalogueFrame } from './catalogue-frame';
 import { itemsOf, viewOf } from './parts/part-views';
-import { pictureOf } from './picture-of';
 
 /** The way into the catalogue: every part, and the pages that explain. */
 @Component({
@@ -100,7 +100,7 @@ export class CataloguePage {
     catalogueParts.map((part) => {
       const items = itemsOf(part.slug, this.catalogue());
       const shown = items[1] ?? items[0];
-      return { ...part, lead: viewOf(part.slug).lead, items, picture: shown ? pictureOf(part.slug, shown, this.catalogue()) : null };
+      return { ...part, lead: viewOf(part.slug).lead, items, picture: shown ? cataloguePicture(part.slug, shown) : null };
     }),
   );
 }

@@ -2,6 +2,7 @@ import { ChangeDetectionStrategy, Component, computed, input } from '@angular/co
 import { RouterLink } from '@angular/router';
 import { type Catalogue } from '@shared/contracts/catalogue';
 import { type PartSlug } from '@shared/contracts/catalogue-parts';
+import { cataloguePicture } from '@shared/drawings/catalogue-pictures';
 import { Drawing } from '../ui/drawing/drawing';
 import { CatalogueFrame } from './catalogue-frame';
 import { chartOf } from './chart-of';
@@ -10,7 +11,6 @@ import { FactTable } from './fact-table';
 import { MissingItem } from './missing-item';
 import { OfferTable } from './offer-table';
 import { itemsOf, partOf, viewOf } from './parts/part-views';
-import { pictureOf } from './picture-of';
 
 /** One item: its figures, how it compares with the others of its part, and who makes it. */
 @Component({
@@ -46,7 +46,7 @@ export class ItemPage {
     const view = this.view();
     const offer = view.offer(item);
     return {
-      picture: pictureOf(this.part(), item, catalogue),
+      picture: cataloguePicture(this.part(), item),
       facts: view.facts(item, catalogue),
       source: view.source(item),
       make: view.bench?.(item, catalogue) ?? null,

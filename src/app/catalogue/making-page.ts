@@ -3,6 +3,7 @@ import { RouterLink } from '@angular/router';
 import { type Catalogue } from '@shared/contracts/catalogue';
 import { standardPressure } from '@shared/glazing/climate-load';
 import { dewPoint, saturationPressure } from '@shared/glazing/condensation';
+import { makingPictures } from '@shared/drawings/making-pictures';
 import { Drawing } from '../ui/drawing/drawing';
 import { CatalogueFrame } from './catalogue-frame';
 import { comparingUnit, heatAndLight } from './comparing-unit';
@@ -27,7 +28,8 @@ export class MakingPage {
   readonly catalogue = input.required<Catalogue>();
 
   protected readonly trail = [{ name: 'Catalogue', path: '/catalogue' }];
-  protected readonly steps = computed(() => makingSteps(this.catalogue()));
+  private readonly pictures = makingPictures();
+  protected readonly steps = makingSteps.map((step) => ({ ...step, drawing: this.pictures[step.picture] }));
 
   protected readonly fog = computed(() => {
     const { u } = heatAndLight(comparingUnit(this.catalogue()), this.catalogue());

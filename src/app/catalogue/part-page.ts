@@ -2,13 +2,13 @@ import { ChangeDetectionStrategy, Component, computed, input } from '@angular/co
 import { RouterLink } from '@angular/router';
 import { type Catalogue } from '@shared/contracts/catalogue';
 import { type PartSlug } from '@shared/contracts/catalogue-parts';
+import { cataloguePicture } from '@shared/drawings/catalogue-pictures';
 import { Drawing } from '../ui/drawing/drawing';
 import { CatalogueFrame } from './catalogue-frame';
 import { chartOf } from './chart-of';
 import { ComparisonTable } from './comparison-table';
 import { FactTable } from './fact-table';
 import { itemsOf, partOf, viewOf } from './parts/part-views';
-import { pictureOf } from './picture-of';
 
 /** One part of a unit: what it does, what there is of it, side by side. */
 @Component({
@@ -29,7 +29,7 @@ export class PartPage {
   protected readonly items = computed(() =>
     itemsOf(this.part(), this.catalogue()).map((item) => ({
       ...item,
-      picture: pictureOf(this.part(), item, this.catalogue()),
+      picture: cataloguePicture(this.part(), item),
       facts: this.view().facts(item, this.catalogue()),
       source: this.view().source(item),
     })),
