@@ -3,7 +3,7 @@ import { type Reason } from '@shared/contracts/evaluation';
 import { type Unit } from '@shared/contracts/units';
 import { buildabilityOf } from '@shared/glazing/buildability';
 import { geometryOf } from '@shared/glazing/geometry';
-import { resolveUnit } from '@shared/glazing/resolve-unit';
+import { type ResolvedUnit, resolveUnit } from '@shared/glazing/resolve-unit';
 import { weightOf } from '@shared/glazing/weight';
 
 /** A unit as far as a price needs its engineering. */
@@ -12,6 +12,8 @@ export interface CheckedUnit {
   weightKg: string;
   /** why this maker cannot build it; empty when it can */
   reasonsAt(fabricator: FabricatorItem): readonly Reason[];
+  /** the same parts at another size, mm, decimal strings */
+  at(width: string, height: string): CheckedUnit;
 }
 
 /**
@@ -25,27 +27,37 @@ export function checkUnits(units: readonly Unit[], catalogue: Catalogue): Checke
   return units.map((unit) => {
     const { place: _place, ...parts } = unit;
     const key = JSON.stringify(parts);
-    let known = checked.get(key);
-    if (!known) checked.set(key, (known = checkUnit(unit, catalogue)));
-    return known;
+    return kept(checked, key, () => checkUnit(unit, catalogue));
   });
 }
 
 function checkUnit(unit: Unit, catalogue: Catalogue): CheckedUnit {
   const found = resolveUnit(unit, catalogue);
   if ('problems' in found) throw new RangeError(found.problems.map(({ pointer, detail }) => `${pointer}: ${detail}`).join('; '));
-  const geometry = geometryOf(found.resolved);
-  const { weight } = weightOf(found.resolved, geometry);
+  return checkResolved(found.resolved, catalogue);
+}
+
+function checkResolved(resolved: ResolvedUnit, catalogue: Catalogue): CheckedUnit {
+  const geometry = geometryOf(resolved);
+  const { weight } = weightOf(resolved, geometry);
   const reasons = new Map<string, readonly Reason[]>();
+  const sizes = new Map<string, CheckedUnit>();
   return {
     weightKg: weight.toFixed(3),
-    reasonsAt: (fabricator) => {
-      let known = reasons.get(fabricator.id);
-      if (!known) {
-        known = buildabilityOf(found.resolved, geometry, weight, fabricator, catalogue).reasons;
-        reasons.set(fabricator.id, known);
-      }
-      return known;
-    },
+    reasonsAt: (fabricator) =>
+      kept(reasons, fabricator.id, () => buildabilityOf(resolved, geometry, weight, fabricator, catalogue).reasons),
+    at: (width, height) =>
+      kept(sizes, `${width}x${height}`, () =>
+        checkResolved(
+          { ...resolved, unit: { ...resolved.unit, width, height }, widthMm: Number(width), heightMm: Number(height) },
+          catalogue,
+        ),
+      ),
   };
+}
+
+function kept<Key, Value>(values: Map<Key, Value>, key: Key, make: () => Value): Value {
+  let value = values.get(key);
+  if (value === undefined) values.set(key, (value = make()));
+  return value;
 }

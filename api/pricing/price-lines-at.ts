@@ -2,10 +2,10 @@ import { type Catalogue, type FabricatorItem } from '@shared/contracts/catalogue
 import { type Reason } from '@shared/contracts/evaluation';
 import { type PriceListVersion, type PriceTerms } from '@shared/contracts/price-lists';
 import { type LineInput, type PricedLine } from '@shared/contracts/prices';
-import { type Unit } from '@shared/contracts/units';
-import { type CheckedUnit, checkUnits } from './check-units';
+import { type CheckedUnit } from './check-units';
+import { compileList } from './engine/compile-list';
 import { findHints } from './engine/hints';
-import { priceLines } from './engine/price-lines';
+import { createPricer } from './engine/price-lines';
 import { type PricedUnit } from './engine/price-unit';
 import { lineToWire } from './engine/rows-to-wire';
 
@@ -35,18 +35,21 @@ export function priceLinesAt(
   const unbuildable = checked.flatMap((unit, line) => unit.reasonsAt(maker).map((reason) => ({ ...reason, line })));
   if (unbuildable.length > 0) return { reasons: unbuildable };
 
-  const toPrice = lines.map(({ unit, quantity, extras }, i) => ({ unit, quantity, extras, weightKg: checked[i]?.weightKg }));
-  const answers = priceLines(toPrice, version, terms, catalogue);
+  const list = compileList(version, catalogue);
+  const price = createPricer(list, terms);
+  const answers = lines.map(({ unit, quantity, extras }, i) => price({ unit, quantity, extras, weightKg: checked[i]?.weightKg }));
   const unrated = answers.flatMap((answer, line) => ('refusals' in answer ? answer.refusals.map((reason) => ({ ...reason, line })) : []));
   if (unrated.length > 0) return { reasons: unrated };
 
-  const canBuild = (unit: Unit) => checkUnits([unit], catalogue)[0]?.reasonsAt(maker).length === 0;
   return {
     lines: lines.flatMap((line, i) => {
-      const answer = answers[i];
-      if (!answer || 'refusals' in answer) return [];
+      const [answer, own] = [answers[i], checked[i]];
+      if (!answer || 'refusals' in answer || !own) return [];
       const { priced } = answer;
-      const hints = findHints(line, priced.unitPriceMinor, version, terms, catalogue, canBuild);
+      const hints = findHints(line, priced.unitPriceMinor, list, price, ({ width, height }) => {
+        const tried = own.at(width, height);
+        return { canBuild: tried.reasonsAt(maker).length === 0, weightKg: tried.weightKg };
+      });
       return [{ priced, sheet: lineToWire(priced, hints) }];
     }),
   };

@@ -2,17 +2,20 @@ import { type UnitInput } from '@shared/contracts/units';
 import { kestrelFordList } from '@seeds/demo/price-lists';
 import { catalogueFactory, unitFactory } from '../../../test/factories/catalogue-factory';
 import { priceListFactory, priceTermsFactory } from '../../../test/factories/price-list-factory';
+import { compileList } from './compile-list';
 import { findHints } from './hints';
+import { createPricer } from './price-lines';
 import { type LineToPrice, priceUnit } from './price-unit';
 
 const catalogue = catalogueFactory();
 const terms = priceTermsFactory();
 
-function hintsFor(overrides: Partial<UnitInput>, list = priceListFactory(), allows?: Parameters<typeof findHints>[5]) {
+function hintsFor(overrides: Partial<UnitInput>, version = priceListFactory(), tryUnit?: Parameters<typeof findHints>[4]) {
   const line: LineToPrice = { unit: unitFactory(overrides), quantity: 6 };
-  const answer = priceUnit(line, list, terms, catalogue);
+  const answer = priceUnit(line, version, terms, catalogue);
   if ('refusals' in answer) throw new Error(JSON.stringify(answer.refusals));
-  return findHints(line, answer.priced.unitPriceMinor, list, terms, catalogue, allows);
+  const list = compileList(version, catalogue);
+  return findHints(line, answer.priced.unitPriceMinor, list, createPricer(list, terms), tryUnit);
 }
 
 describe('what would make it cheaper', () => {
@@ -67,7 +70,7 @@ describe('what would make it cheaper', () => {
   });
 
   it('names no size that the maker cannot build', () => {
-    const hints = hintsFor({}, priceListFactory(), ({ width, height }) => !(width === '914.4' && height === '1219.2'));
+    const hints = hintsFor({}, priceListFactory(), ({ width, height }) => ({ canBuild: !(width === '914.4' && height === '1219.2') }));
     expect(hints.some(({ width, height }) => width === '914.4' && height === '1219.2')).toBe(false);
     expect(hints.length).toBeGreaterThan(0);
   });
