@@ -35,6 +35,7 @@ describe('quotes', () => {
       units: 6,
       goods: { amount: '1105.38', currency: 'USD' },
       leadTimeDays: 8,
+      earliestOn: '2026-09-25',
       order: null,
       lines: [{ position: 1, tag: 'W1', makeUp: '3 temp / 16 argon / 3 temp low-e 3', quantity: 6, unitPrice: { amount: '184.23' } }],
     });
