@@ -11,6 +11,7 @@ import { creditStateOf } from '../receivables/read-credit';
 import { creditRefusal } from './credit-refusal';
 import { doOnce } from './do-once';
 import { documentNumber } from './document-number';
+import { accountOf } from './order-checks';
 import { canDispatchIn } from './order-life';
 import { type OrderLineRow } from './order-store';
 import { readOrder } from './read-order';
@@ -39,8 +40,7 @@ export function dispatchOrder(
     if (!canDispatchIn(order.state))
       throw new Refusal('not-in-this-state', `Nothing can be dispatched of an order that is ${order.state}.`);
     const lines = quantitiesNow(stores.orders.linesOf(order.id), body.lines);
-    const account = stores.companies.tradeAccount(order.tradeAccountId);
-    if (!account) throw new Error(`no trade account ${order.tradeAccountId}`);
+    const account = accountOf(order.tradeAccountId, dependencies);
     const maker = stores.orders.maker(order.fabricatorId);
 
     const credit = creditStateOf(account, dayIn(maker.timeZone, clock()), { stores });

@@ -16,7 +16,8 @@ export function listOrders(
   { query }: Pick<Input<typeof listOrdersEndpoint>, 'query'>,
   { stores }: Pick<Dependencies, 'stores'>,
 ): AnswerOf<typeof listOrdersEndpoint> {
-  const { q, state, dealer, cursor, limit } = query;
+  const { state, dealer, cursor, limit } = query;
+  const q = query.q?.trim();
   const companyKind = actor.companyKind === 'dealer' ? 'dealer' : 'fabricator';
   if (companyKind === 'dealer' && dealer !== undefined && dealer !== actor.companyId) return { items: [], nextCursor: null };
   const filter: OrderFilter = {

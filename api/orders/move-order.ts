@@ -3,12 +3,14 @@ import { type AnswerOf } from '@shared/contracts/endpoint';
 import { type moveOrder as moveOrderEndpoint, type OrderState } from '@shared/contracts/orders';
 import { Refusal } from '@shared/contracts/problems';
 import { type Member } from '../companies/actor';
+import { type TradeAccountRow } from '../companies/company-store';
 import { type Dependencies } from '../dependencies';
 import { type Input } from '../http/serve';
 import { checkPlacement } from '../receivables/credit-check';
 import { creditStateOf } from '../receivables/read-credit';
 import { acknowledgeOrder } from './acknowledge-order';
 import { creditReason } from './credit-refusal';
+import { accountOf, openAccount } from './order-checks';
 import { judgeMove } from './order-life';
 import { type OrderRow, type ReadOrderRow } from './order-store';
 import { promisedDay } from './promised-day';
@@ -20,7 +22,7 @@ import { reservedMinorOf } from './reservation';
  * what the order reserves of the credit, and the acknowledgement where it reaches the maker now.
  * An approval checks credit and puts the order into credit review where it does not reach.
  *
- * @throws Refusal `not-found`, `not-in-this-state`, `not-allowed`, or `invalid` without the reason that the move needs
+ * @throws Refusal `not-found`, `not-in-this-state`, `not-allowed`, `account-not-open` where it would reach the maker, or `invalid` without the reason that the move needs
  */
 export function moveOrder(
   actor: Member,
@@ -34,17 +36,17 @@ export function moveOrder(
     const { order } = found;
     const move = judgeMove(order, body.to, body.reason, actor.roles);
     if (move instanceof Refusal) throw move;
-    const short = move.credit === 'check' ? creditShortage(order, dependencies) : null;
-    if (short) writeMove(actor, found, 'credit review', short, dependencies);
-    else writeMove(actor, found, move.to, body.reason ?? null, dependencies);
+    const account =
+      move.to === 'submitted' ? openAccount(order.tradeAccountId, dependencies) : accountOf(order.tradeAccountId, dependencies);
+    const short = move.credit === 'check' ? creditShortage(order, account, dependencies) : null;
+    if (short) writeMove(actor, found, account, 'credit review', short, dependencies);
+    else writeMove(actor, found, account, move.to, body.reason ?? null, dependencies);
   });
   return readOrder(actor, { params }, dependencies);
 }
 
 /** Why the order's credit does not reach now; null when it does. */
-function creditShortage(order: OrderRow, { stores, clock }: Dependencies): string | null {
-  const account = stores.companies.tradeAccount(order.tradeAccountId);
-  if (!account) throw new Error(`no trade account ${order.tradeAccountId}`);
+function creditShortage(order: OrderRow, account: TradeAccountRow, { stores, clock }: Dependencies): string | null {
   const today = dayIn(stores.orders.maker(order.fabricatorId).timeZone, clock());
   const answer = checkPlacement(creditStateOf(account, today, { stores }), order.totalMinor);
   return answer.ok ? null : creditReason(answer);
@@ -53,13 +55,12 @@ function creditShortage(order: OrderRow, { stores, clock }: Dependencies): strin
 function writeMove(
   actor: Member,
   { order, leadTimeClass }: ReadOrderRow,
+  account: TradeAccountRow,
   to: OrderState,
   reason: string | null,
   dependencies: Dependencies,
 ): void {
   const { stores, clock } = dependencies;
-  const account = stores.companies.tradeAccount(order.tradeAccountId);
-  if (!account) throw new Error(`no trade account ${order.tradeAccountId}`);
   const moved = { ...order, state: to };
   if (to === 'submitted') {
     const maker = stores.orders.maker(order.fabricatorId);

@@ -20,9 +20,15 @@ export function orderableQuote(actor: Member, id: string, { stores, clock }: Dep
   return quote;
 }
 
-export function openAccount(id: string, { stores }: Dependencies): TradeAccountRow {
+/** The account of a quote or order, which refers to one that exists. */
+export function accountOf(id: string, { stores }: Pick<Dependencies, 'stores'>): TradeAccountRow {
   const account = stores.companies.tradeAccount(id);
   if (!account) throw new Error(`no trade account ${id}`);
+  return account;
+}
+
+export function openAccount(id: string, dependencies: Pick<Dependencies, 'stores'>): TradeAccountRow {
+  const account = accountOf(id, dependencies);
   if (account.state !== 'open') throw new Refusal('account-not-open', `The trade account at ${account.fabricatorName} is closed.`);
   return account;
 }

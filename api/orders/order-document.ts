@@ -8,6 +8,7 @@ import { type Dependencies } from '../dependencies';
 import { type AcknowledgementDocument, type Party } from '../documents/document-models';
 import { renderAcknowledgementPdf } from '../documents/render-acknowledgement-pdf';
 import { type FileAnswer, type Input } from '../http/serve';
+import { accountOf } from './order-checks';
 import { type ReadOrderRow } from './order-store';
 
 /** The acknowledgement of an order that the reader's company is a party of. @throws Refusal `not-found` */
@@ -21,21 +22,13 @@ export async function orderPdf(
   return { fileName: `${found.order.number}.pdf`, bytes: await renderAcknowledgementPdf(orderDocument(found, dependencies)) };
 }
 
-/** The acknowledgement to attach to a mail, by the order's id. @throws Error when there is no such order */
-export async function acknowledgementOf(orderId: string, dependencies: Pick<Dependencies, 'stores' | 'catalogue'>): Promise<Uint8Array> {
-  const found = dependencies.stores.orders.find(orderId);
-  if (!found) throw new Error(`no order ${orderId}`);
-  return renderAcknowledgementPdf(orderDocument(found, dependencies));
-}
-
 /** An order as its acknowledgement says it, in the maker's name; the same for both sides. */
 export function orderDocument(
   { order, dealerName, placedByName }: ReadOrderRow,
   { stores, catalogue }: Pick<Dependencies, 'stores' | 'catalogue'>,
 ): AcknowledgementDocument {
   const maker = stores.orders.maker(order.fabricatorId);
-  const account = stores.companies.tradeAccount(order.tradeAccountId);
-  if (!account) throw new Error(`no trade account ${order.tradeAccountId}`);
+  const account = accountOf(order.tradeAccountId, { stores });
   const { lines, email, phone } = maker.letterhead;
   return {
     sender: { name: maker.name, lines, email, phone },

@@ -124,9 +124,6 @@ export function orderStore(db: Db) {
 
     recordMove: (row: MoveRow) => recordMove.run({ ...row }),
 
-    /** An order, whoever's, with the names that stand on it: for documents, whose reader has been checked. */
-    find: (id: string) => read.get({ id }),
-
     /** An order that the company is a party of, with the names that stand on it. */
     read: (companyId: string, id: string) => {
       const found = read.get({ id });

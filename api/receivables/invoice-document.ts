@@ -24,13 +24,6 @@ export async function invoicePdf(
   return { fileName: `${found.invoice.number}.pdf`, bytes: await renderInvoicePdf(invoiceDocument(found, dependencies)) };
 }
 
-/** The invoice to attach to a mail, by its id. @throws Error when there is no such invoice */
-export async function invoicePdfOf(invoiceId: string, dependencies: Pick<Dependencies, 'stores'>): Promise<Uint8Array> {
-  const found = dependencies.stores.invoices.find(invoiceId);
-  if (!found) throw new Error(`no invoice ${invoiceId}`);
-  return renderInvoicePdf(invoiceDocument(found, dependencies));
-}
-
 /** An invoice as its document says it, in the maker's name. Days and discount are those it was issued with, whatever the terms are now. */
 export function invoiceDocument(found: ReadInvoiceRow, { stores }: Pick<Dependencies, 'stores'>): InvoiceDocument {
   const { invoice, shipTo } = found;

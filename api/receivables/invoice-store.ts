@@ -46,22 +46,6 @@ export function invoiceStore(db: Db) {
       .innerJoin(dealers, eq(dealers.id, invoices.dealerId))
       .innerJoin(makers, eq(makers.id, invoices.fabricatorId))
       .where(and(ofAccount(filter), filter.state === 'open' ? isOpen : filter.state === 'paid' ? isPaid : undefined, ...also));
-  const whole = (condition: SQL | undefined) =>
-    db
-      .select({
-        invoice: invoices,
-        ...names,
-        orderNumber: orders.number,
-        poNumber: orders.poNumber,
-        shipTo: orders.shipTo,
-        dispatchNumber: dispatches.number,
-      })
-      .from(invoices)
-      .innerJoin(dealers, eq(dealers.id, invoices.dealerId))
-      .innerJoin(makers, eq(makers.id, invoices.fabricatorId))
-      .innerJoin(orders, eq(orders.id, invoices.orderId))
-      .innerJoin(dispatches, eq(dispatches.id, invoices.dispatchId))
-      .where(condition);
   const addToOpen = db
     .update(invoices)
     .set({ openMinor: sql`${invoices.openMinor} + ${sql.placeholder('change')}` })
@@ -105,12 +89,24 @@ export function invoiceStore(db: Db) {
         .where(and(eq(allocations.invoiceId, invoiceId), isNull(allocations.reversedAt)))
         .get()?.minor ?? 0,
 
-    /** An invoice, whoever's, with what it stands on: for documents, whose reader has been checked. */
-    find: (id: string) => whole(eq(invoices.id, id)).get(),
-
     /** An invoice that the company is a party of, with what it stands on. */
     read: (companyId: string, id: string) =>
-      whole(and(eq(invoices.id, id), or(eq(invoices.dealerId, companyId), eq(invoices.fabricatorId, companyId)))).get(),
+      db
+        .select({
+          invoice: invoices,
+          ...names,
+          orderNumber: orders.number,
+          poNumber: orders.poNumber,
+          shipTo: orders.shipTo,
+          dispatchNumber: dispatches.number,
+        })
+        .from(invoices)
+        .innerJoin(dealers, eq(dealers.id, invoices.dealerId))
+        .innerJoin(makers, eq(makers.id, invoices.fabricatorId))
+        .innerJoin(orders, eq(orders.id, invoices.orderId))
+        .innerJoin(dispatches, eq(dispatches.id, invoices.dispatchId))
+        .where(and(eq(invoices.id, id), or(eq(invoices.dealerId, companyId), eq(invoices.fabricatorId, companyId))))
+        .get(),
 
     /** Open ones by the earliest due day, others by the latest; those after (due day, id). */
     page: (filter: InvoiceFilter, after: [string, string] | undefined, limit: number) => {

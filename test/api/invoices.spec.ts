@@ -2,6 +2,7 @@ import ISO11649 from 'iso-11649';
 import { minorOf } from '@shared/money/money';
 import { verifyLedger } from '@api/receivables/verify-ledger';
 import { type Answer, type Market, marketFactory } from '../factories/market-factory';
+import { pdfPages } from '../factories/pdf-text';
 import { acceptedOrderFactory, as, dispatch, key } from '../factories/order-factory';
 
 const cents = ({ amount }: { amount: string }) => minorOf(amount, 'USD');
@@ -83,6 +84,31 @@ describe('invoices', () => {
     expect(numbers(await get(clerk, '/api/invoices?tradeAccount=ottery.northmere'))).toEqual(['NM-INV000003', 'NM-INV000001']);
     expect(numbers(await get(clerk, '/api/invoices?tradeAccount=ottery.kestrel-ford'))).toEqual([]);
     expect(numbers(await get('buyer@perrin.example', '/api/invoices?tradeAccount=ottery.northmere'))).toEqual([]);
+  });
+
+  it('come as PDF with number, reference, order and total, as do acknowledgements, to either side alone', async () => {
+    const { body: list } = await get('buyer@ottery.example', '/api/invoices?q=NM-INV000001');
+    const [item] = list.items;
+    const { body: invoice } = await get('buyer@ottery.example', `/api/invoices/${item.id}`);
+    const texts = async (email: string, path: string) => {
+      const answer = await get(email, path);
+      expect([answer.status, answer.type]).toEqual([200, 'application/pdf']);
+      expect(answer.headers['content-disposition']).toContain('.pdf"');
+      return pdfPages(answer.body as Uint8Array)
+        .flat()
+        .join(' ');
+    };
+    for (const email of ['buyer@ottery.example', 'accounts@northmere.example']) {
+      const paper = await texts(email, `/api/invoices/${item.id}/pdf`);
+      for (const text of [item.number, invoice.order.number, invoice.order.poNumber, invoice.dispatch.number])
+        expect(paper).toContain(text);
+      expect(paper.replace(/\s/g, '')).toContain(item.reference);
+      const order = await texts(email, `/api/orders/${invoice.order.id}/pdf`);
+      expect(order).toContain(invoice.order.number);
+    }
+    for (const path of [`/api/invoices/${item.id}/pdf`, `/api/orders/${invoice.order.id}/pdf`]) {
+      expect((await get('buyer@perrin.example', path)).status).toBe(404);
+    }
   });
 
   it('turn paid with the last cent, and overdue by days', async () => {

@@ -1,6 +1,6 @@
 import { eq } from 'drizzle-orm';
 import { minorOf } from '@shared/money/money';
-import { fabricators } from '@api/database/schema/companies';
+import { fabricators, tradeAccounts } from '@api/database/schema/companies';
 import { verifyLedger } from '@api/receivables/verify-ledger';
 import { type Market, marketFactory } from '../factories/market-factory';
 import { unitFactory } from '../factories/catalogue-factory';
@@ -177,6 +177,19 @@ describe('placing an order', () => {
   it('lets a PO number stand on two orders', async () => {
     expect((await orderFactory(market)).status).toBe(201);
     expect((await orderFactory(market)).status).toBe(201);
+  });
+
+  it('goes nowhere at a closed account, not even by approval or release', async () => {
+    const made = await quote();
+    const waiting = await orderFactory(market, { lines: [{ quantity: 600 }], more: { review: true } });
+    expect(waiting.body.state).toBe('credit review');
+    market.dependencies.database.db.update(tradeAccounts).set({ state: 'closed' }).where(eq(tradeAccounts.id, 'ottery.northmere')).run();
+    expect(await refused(() => place(made.id))).toMatchObject({ status: 409, type: '/problems/account-not-open' });
+    const clerk = await as(market, 'accounts@northmere.example');
+    expect(await refused(() => clerk.post(`/api/orders/${waiting.body.id}/moves`, { to: 'submitted' }))).toMatchObject({
+      status: 409,
+      type: '/problems/account-not-open',
+    });
   });
 
   describe('above the buyer’s limit', () => {
