@@ -1,5 +1,5 @@
 import { isPlatformBrowser } from '@angular/common';
-import { DestroyRef, effect, inject, Injectable, PLATFORM_ID, signal, untracked } from '@angular/core';
+import { computed, DestroyRef, effect, inject, Injectable, PLATFORM_ID, signal, untracked } from '@angular/core';
 import { takeUntilDestroyed } from '@angular/core/rxjs-interop';
 import { type ParamMap, type Params, Router } from '@angular/router';
 import { debounce, Subject, timer } from 'rxjs';
@@ -28,6 +28,12 @@ export class BenchAddress {
   private readonly known = signal<Params>({});
   /** just read: what is written of it is the same place, spelt as usual */
   private fresh = true;
+
+  /** The Bench with what stands on it, also where its address is yet to follow. */
+  readonly here = computed(() => {
+    const wanted = this.wanted();
+    return wanted === null ? this.router.url : this.router.serializeUrl(this.router.createUrlTree(['/bench'], { queryParams: wanted }));
+  });
 
   constructor() {
     const route = this.router.routerState.root;
@@ -60,6 +66,8 @@ export class BenchAddress {
   private async write(entry: boolean): Promise<void> {
     const wanted = this.wanted();
     if (wanted === null || same(wanted, this.known())) return;
+    // Somebody is on the way to another page: a write would call them back. If they stay after all, it is made up for.
+    if (this.router.currentNavigation() !== null) return this.writes.next('after a pause');
     this.known.set(wanted);
     await this.router.navigate([], { queryParams: wanted, queryParamsHandling: 'merge', replaceUrl: !entry, scroll: 'manual' });
   }

@@ -1,7 +1,8 @@
 import { ChangeDetectionStrategy, Component, inject } from '@angular/core';
 import { MatButton } from '@angular/material/button';
-import { Router, RouterLink } from '@angular/router';
+import { RouterLink } from '@angular/router';
 import { Session } from '../session/session';
+import { BenchAddress } from './bench-address';
 import { MakerList } from './maker-list';
 
 /** For those without prices: who can build the unit, and the way to prices of one's own. */
@@ -50,10 +51,6 @@ import { MakerList } from './maker-list';
 })
 export class VisitorPanel {
   protected readonly session = inject(Session);
-  private readonly router = inject(Router);
-
   /** The Bench as it stands, to come back to. */
-  protected here(): string {
-    return this.router.url;
-  }
+  protected readonly here = inject(BenchAddress).here;
 }
