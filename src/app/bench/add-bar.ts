@@ -29,6 +29,11 @@ export class AddBar {
   protected readonly quantity = computed(() => this.draft.quantity() ?? 1);
   protected readonly linePrice = computed(() => (this.price.offers() ? this.maker.offer()?.lines[0]?.linePrice : undefined));
   protected readonly current = computed(() => this.quotes.at(this.maker.offer()?.tradeAccount));
+  /** The line added last, while its quote is the one that the next line goes to. */
+  protected readonly added = computed(() => {
+    const added = this.quotes.added();
+    return added?.quote.id === this.current()?.id ? added : null;
+  });
   /** Why nothing can be added now, or null. */
   protected readonly hindrance = computed(() => {
     const { unit, quantity, problems } = this.draft.reading();

@@ -1,10 +1,9 @@
-import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
+import { ChangeDetectionStrategy, Component, input } from '@angular/core';
 import { Icon } from '../ui/icon';
 import { type NobodyNote } from './nobody-builds';
-import { detailsOf } from './reason-words';
 import { TakeNearest } from './take-nearest';
 
-/** Beside a field: why nobody can build what it holds, and the nearest that one maker can. */
+/** Beside a field: that nobody can build what it holds, why not, and the nearest that one maker can. */
 @Component({
   selector: 'app-field-note',
   imports: [Icon, TakeNearest],
@@ -12,7 +11,7 @@ import { TakeNearest } from './take-nearest';
   template: `
     @if (note(); as nobody) {
       <p>
-        <app-icon name="warning" /> No maker can build this. {{ nobody.maker.name }} comes nearest: {{ details() }}.
+        <app-icon name="warning" /> No maker can build this. {{ nobody.maker.name }} comes nearest: {{ nobody.detail }}.
         <app-take-nearest [maker]="nobody.maker.id" />
       </p>
     }
@@ -25,7 +24,6 @@ import { TakeNearest } from './take-nearest';
       display: none;
     }
     p {
-      margin-top: -6px;
       padding: 0 2px;
       color: var(--sy-error);
       font-size: 13px;
@@ -34,5 +32,4 @@ import { TakeNearest } from './take-nearest';
 })
 export class FieldNote {
   readonly note = input.required<NobodyNote | null>();
-  protected readonly details = computed(() => detailsOf(this.note()?.reasons ?? []).join('; '));
 }

@@ -1,23 +1,15 @@
-import { ChangeDetectionStrategy, Component, computed, inject } from '@angular/core';
+import { ChangeDetectionStrategy, Component, inject } from '@angular/core';
 import { LayerList } from './layer-list';
-import { TextField } from './text-field';
+import { MakeUpField } from './make-up-field';
 import { UnitDraft } from './unit-draft';
 
 /** The make-up from outside in: as the trade writes it, and layer by layer, in step with each other. */
 @Component({
   selector: 'app-make-up-form',
-  imports: [LayerList, TextField],
+  imports: [LayerList, MakeUpField],
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
-    <app-text-field
-      label="As you would write it"
-      [longest]="200"
-      [text]="draft.makeUp()"
-      [problem]="problem()"
-      (typed)="draft.typeMakeUp($event)"
-      (left)="draft.settleMakeUp()"
-      (entered)="draft.settleMakeUp()"
-    />
+    <app-make-up-field />
     <app-layer-list />
     <p>
       @if (draft.draft().lites.length < 3) {
@@ -42,5 +34,4 @@ import { UnitDraft } from './unit-draft';
 })
 export class MakeUpForm {
   protected readonly draft = inject(UnitDraft);
-  protected readonly problem = computed(() => this.draft.problemAt('/makeUp'));
 }

@@ -1,6 +1,5 @@
 import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
 import { type Reason } from '@shared/contracts/evaluation';
-import { detailsOf } from './reason-words';
 import { TakeNearest } from './take-nearest';
 
 /** Why one maker cannot build the unit, and the nearest that it can. */
@@ -30,8 +29,9 @@ import { TakeNearest } from './take-nearest';
   `,
 })
 export class MakerReasons {
-  readonly reasons = input.required<readonly Reason[]>();
   /** identity of the maker */
   readonly maker = input.required<string>();
-  protected readonly details = computed(() => detailsOf(this.reasons()));
+  readonly reasons = input.required<readonly Reason[]>();
+  /** Each once: two lites of the same glass are refused for the same reason. */
+  protected readonly details = computed(() => [...new Set(this.reasons().map(({ detail }) => detail))]);
 }

@@ -5,7 +5,7 @@ import { UnitDraft } from './unit-draft';
 /** The maker that comes nearest, and what of one field it refuses. */
 export interface NobodyNote {
   maker: { id: string; name: string };
-  reasons: readonly Reason[];
+  detail: string;
 }
 
 /**
@@ -21,9 +21,16 @@ export class NobodyBuilds {
     return buildability.reduce((best, maker) => (maker.reasons.length < best.reasons.length ? maker : best));
   });
 
+  /** @param pointer into the unit; fields below it count too */
   at(pointer: string): NobodyNote | null {
     const nearest = this.nearest();
     const reasons = nearest?.reasons.filter((reason) => reason.pointer === pointer || reason.pointer.startsWith(`${pointer}/`)) ?? [];
-    return nearest && reasons.length > 0 ? { maker: nearest.fabricator, reasons } : null;
+    const reason = reasons.find(decides) ?? reasons[0];
+    return nearest && reason ? { maker: nearest.fabricator, detail: reason.detail } : null;
   }
+}
+
+/** Of several limits along one edge, the one that the nearest value comes from. */
+function decides({ limit, nearestValue }: Reason): boolean {
+  return nearestValue !== null && limit.split(' ')[0] === nearestValue;
 }

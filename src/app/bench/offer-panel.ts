@@ -27,7 +27,6 @@ export class OfferPanel {
   private readonly money = inject(MoneyPipe);
 
   protected readonly quantity = computed(() => this.draft.quantity() ?? 1);
-  protected readonly pending = computed(() => this.price.state().is !== 'priced');
   protected readonly failed = computed(() => {
     const state = this.price.state();
     return state.is === 'failed' ? state.problem : null;
@@ -44,14 +43,15 @@ export class OfferPanel {
     this.draft.evaluation().buildability.some(({ fabricator }) => !this.named().includes(fabricator.id)),
   );
   protected readonly mayReadCredit = computed(() => this.session.may('trade-accounts.credit'));
+  /** What stands in the place of a price. */
   protected readonly status = computed(() => {
     switch (this.price.state().is) {
+      case 'priced':
+        return '';
       case 'pricing':
         return 'pricing…';
-      case 'waiting':
-        return 'waiting for a unit that can be priced';
       default:
-        return '';
+        return 'no price';
     }
   });
 

@@ -8,12 +8,12 @@ import { TextField } from './text-field';
 import { ThreeAnswers } from './three-answers';
 import { UnitDraft } from './unit-draft';
 
-const questions: Record<PlaceQuestion, { asks: string; yes: string }> = {
-  door: { asks: 'In a door', yes: 'in a door' },
-  nearDoor: { asks: 'A door within 24 in (610 mm)', yes: 'beside a door' },
-  wetArea: { asks: 'Bath, shower or pool within 60 in (1 524 mm)', yes: 'wet area' },
-  stairs: { asks: 'Stairs, ramp or landing within 36 in (914 mm)', yes: 'by stairs' },
-  footOfStairs: { asks: 'Bottom of stairs within 60 in (1 524 mm)', yes: 'foot of stairs' },
+const questions: Record<PlaceQuestion, { imperial: string; metric: string; yes: string }> = {
+  door: { imperial: 'In a door', metric: 'In a door', yes: 'in a door' },
+  nearDoor: { imperial: 'A door within 24 in', metric: 'A door within 610 mm', yes: 'beside a door' },
+  wetArea: { imperial: 'Bath, shower or pool within 60 in', metric: 'Bath, shower or pool within 1 524 mm', yes: 'wet area' },
+  stairs: { imperial: 'Stairs, ramp or landing within 36 in', metric: 'Stairs, ramp or landing within 914 mm', yes: 'by stairs' },
+  footOfStairs: { imperial: 'Bottom of stairs within 60 in', metric: 'Bottom of stairs within 1 524 mm', yes: 'foot of stairs' },
 };
 
 /** Where the unit goes, as far as it is known: nothing of it changes a price. */

@@ -3,7 +3,7 @@ interface Point {
   u: number;
 }
 
-/** A curve placed on a sheet of 340 × 196, with its grid. */
+/** A curve placed on a sheet of 300 × 186, with its grid. */
 export interface Plot {
   width: number;
   height: number;
@@ -13,7 +13,7 @@ export interface Plot {
   dot: { x: number; y: number; label: string; labelY: number } | null;
 }
 
-const sheet = { width: 340, height: 196, left: 34, right: 14, top: 16, bottom: 28 };
+const sheet = { width: 300, height: 186, left: 34, right: 14, top: 16, bottom: 28 };
 
 /** Places U-values over cavity widths; the levels are round numbers that hold the whole curve. */
 export function plotCurve(points: readonly Point[], own: Point | null): Plot {

@@ -19,7 +19,6 @@ export class ResultStrip {
     const { thermal, solar, weight, geometry } = this.draft.evaluation();
     const system = this.draft.system();
     const other = otherMeasure(system);
-    const quantity = this.draft.quantity() ?? 1;
     const mm = geometry.overallThickness * 1000;
     const [weightFigure = '', weightUnit = ''] = formatWeight(weight, system).split(' ');
     const thickness = formatThickness(mm, system);
@@ -40,10 +39,7 @@ export class ResultStrip {
         name: 'Weight, each',
         value: weightFigure,
         unit: weightUnit,
-        below:
-          quantity > 1
-            ? `${formatWeight(weight, other)}; all ${quantity} ${formatWeight(weight * quantity, system)}`
-            : formatWeight(weight, other),
+        below: formatWeight(weight, other),
       },
       {
         name: 'Overall thickness',
@@ -71,9 +67,11 @@ export class ResultStrip {
   });
 
   protected readonly area = computed(() => {
-    const { area } = this.draft.evaluation().geometry;
+    const { geometry, weight } = this.draft.evaluation();
     const system = this.draft.system();
-    return `Area ${formatArea(area, system)} (${formatArea(area, otherMeasure(system))}).`;
+    const quantity = this.draft.quantity() ?? 1;
+    const all = quantity > 1 ? ` All ${quantity} weigh ${formatWeight(weight * quantity, system)}.` : '';
+    return `Area ${formatArea(geometry.area, system)} (${formatArea(geometry.area, otherMeasure(system))}).${all}`;
   });
 
   protected readonly methods = computed(() => {

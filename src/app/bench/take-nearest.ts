@@ -1,6 +1,6 @@
 import { ChangeDetectionStrategy, Component, computed, inject, input } from '@angular/core';
+import { changeWords } from './change-words';
 import { findWay } from './find-way';
-import { takesWords } from './reason-words';
 import { UnitDraft } from './unit-draft';
 
 /** A button that changes the unit to the nearest that a maker can build, where there is one. */
@@ -8,8 +8,8 @@ import { UnitDraft } from './unit-draft';
   selector: 'app-take-nearest',
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
-    @if (way(); as found) {
-      <button type="button" class="quiet" (click)="draft.take(found.unit)">Take {{ words() }}</button>
+    @if (way(); as nearest) {
+      <button type="button" class="quiet" (click)="draft.take(nearest)">Take {{ words() }}</button>
     }
   `,
   styleUrl: './quiet.scss',
@@ -18,6 +18,9 @@ export class TakeNearest {
   /** identity of the maker */
   readonly maker = input.required<string>();
   protected readonly draft = inject(UnitDraft);
-  protected readonly way = computed(() => findWay(this.draft.shown(), this.maker(), this.draft.catalogue()));
-  protected readonly words = computed(() => takesWords(this.way()?.met ?? [], this.draft.catalogue(), this.draft.system()));
+  protected readonly way = computed(() => findWay(this.draft.shown(), this.maker(), this.draft.catalogue(), this.draft.system()));
+  protected readonly words = computed(() => {
+    const way = this.way();
+    return way ? changeWords(this.draft.shown(), way, this.draft.catalogue(), this.draft.system()) : '';
+  });
 }

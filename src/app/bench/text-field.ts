@@ -38,7 +38,7 @@ const PAUSE = 900;
         [attr.inputmode]="keys()"
         [attr.enterkeyhint]="enterKeyHint()"
         (input)="type()"
-        (blur)="leave()"
+        (blur)="settled.set(true)"
         (keydown.enter)="enter($event)"
       />
       @if (suffix(); as words) {
@@ -60,12 +60,11 @@ export class TextField {
   readonly longest = input(80);
   readonly enterKeyHint = input<string | null>(null);
   readonly typed = output<string>();
-  readonly left = output();
   readonly entered = output();
 
   private readonly field = viewChild.required<ElementRef<HTMLInputElement>>('field');
   protected readonly control = new FormControl('', { nonNullable: true });
-  private readonly settled = signal(true);
+  protected readonly settled = signal(true);
   private pause: ReturnType<typeof setTimeout> | undefined;
   protected readonly shown = computed(() => (this.settled() ? this.problem() : null));
   protected readonly matcher = { isErrorState: () => this.shown() !== null };
@@ -88,11 +87,6 @@ export class TextField {
     clearTimeout(this.pause);
     this.pause = setTimeout(() => this.settled.set(true), PAUSE);
     this.typed.emit(this.control.value);
-  }
-
-  protected leave(): void {
-    this.settled.set(true);
-    this.left.emit();
   }
 
   protected enter(event: Event): void {

@@ -34,7 +34,7 @@ export class Workbench {
   private readonly quotes = inject(CurrentQuotes);
   private readonly asker = inject(Asker);
   private readonly sizes = viewChild.required(SizeForm);
-  private readonly addBar = viewChild(AddBar);
+  private readonly addBar = viewChild<AddBar>('addBar');
 
   constructor() {
     inject(BenchAddress);
