@@ -57,7 +57,7 @@ export function dispatchOrder(
     const dispatchedUnits = order.dispatchedUnits + lines.reduce((sum, { now }) => sum + now, 0);
     const state = dispatchedUnits === order.units ? ('dispatched' as const) : order.state;
     const after = { ...order, state, dispatchedUnits, invoicedMinor: order.invoicedMinor + invoice.totalMinor };
-    stores.orders.change(order.id, { state, dispatchedUnits, invoicedMinor: after.invoicedMinor });
+    stores.orders.save(after);
     if (state !== order.state) {
       stores.orders.recordMove({ orderId: order.id, from: order.state, to: state, at: clock(), personId: actor.personId, reason: null });
     }

@@ -67,7 +67,7 @@ function writeMove(
     moved.promisedOn = promisedDay(dayIn(maker.timeZone, clock()), leadTimeClass, maker.calendar);
     acknowledgeOrder(moved, maker, dependencies);
   }
-  stores.orders.change(order.id, { state: to, promisedOn: moved.promisedOn });
+  stores.orders.save(moved);
   stores.orders.recordMove({ orderId: order.id, from: order.state, to, at: clock(), personId: actor.personId, reason });
   const reservedMinor = reservedMinorOf(moved, account.countsFrom) - reservedMinorOf(order, account.countsFrom);
   if (reservedMinor !== 0) stores.companies.addToBalances(account.id, { reservedMinor });

@@ -104,6 +104,29 @@ export function orderStore(db: Db) {
     .where(eq(dispatches.orderId, place('id')))
     .orderBy(asc(dispatches.at), asc(dispatches.number))
     .prepare();
+  const linesOfDispatch = db
+    .select()
+    .from(dispatchLines)
+    .where(eq(dispatchLines.dispatchId, place('id')))
+    .prepare();
+  const save = db
+    .update(orders)
+    .set({
+      state: sql`${place('state')}`,
+      promisedOn: sql`${place('promisedOn')}`,
+      dispatchedUnits: sql`${place('dispatchedUnits')}`,
+      invoicedMinor: sql`${place('invoicedMinor')}`,
+    })
+    .where(eq(orders.id, place('id')))
+    .prepare();
+  const insertDispatch = db
+    .insert(dispatches)
+    .values({ id: place('id'), orderId: place('orderId'), number: place('number'), at: place('at'), personId: place('personId') })
+    .prepare();
+  const insertDispatchLine = db
+    .insert(dispatchLines)
+    .values({ dispatchId: place('dispatchId'), orderLineId: place('orderLineId'), quantity: place('quantity') })
+    .prepare();
   const addDispatched = db
     .update(orderLines)
     .set({ dispatched: sql`${orderLines.dispatched} + ${place('quantity')}` })
@@ -134,33 +157,19 @@ export function orderStore(db: Db) {
 
     movesOf: (orderId: string) => movesOf.all({ id: orderId }),
 
-    dispatchesOf: (orderId: string) => {
-      const found = dispatchesOf.all({ id: orderId });
-      const lines =
-        found.length === 0
-          ? []
-          : db
-              .select()
-              .from(dispatchLines)
-              .where(
-                inArray(
-                  dispatchLines.dispatchId,
-                  found.map(({ dispatch }) => dispatch.id),
-                ),
-              )
-              .all();
-      return found.map((row) => ({ ...row, lines: lines.filter(({ dispatchId }) => dispatchId === row.dispatch.id) }));
-    },
+    dispatchesOf: (orderId: string) =>
+      dispatchesOf.all({ id: orderId }).map((row) => ({ ...row, lines: linesOfDispatch.all({ id: row.dispatch.id }) })),
 
-    change: (id: string, change: Partial<Pick<OrderRow, 'state' | 'promisedOn' | 'dispatchedUnits' | 'invoicedMinor'>>) =>
-      db.update(orders).set(change).where(eq(orders.id, id)).run(),
+    /** Keeps what moves and dispatches change of an order. */
+    save: ({ id, state, promisedOn, dispatchedUnits, invoicedMinor }: OrderRow) =>
+      save.run({ id, state, promisedOn, dispatchedUnits, invoicedMinor }),
 
     insertDispatch: (row: typeof dispatches.$inferInsert, lines: readonly { orderLineId: string; quantity: number }[]): void => {
-      db.insert(dispatches).values(row).run();
-      db.insert(dispatchLines)
-        .values(lines.map((line) => ({ ...line, dispatchId: row.id })))
-        .run();
-      for (const { orderLineId, quantity } of lines) addDispatched.run({ id: orderLineId, quantity });
+      insertDispatch.run({ ...row });
+      for (const { orderLineId, quantity } of lines) {
+        insertDispatchLine.run({ dispatchId: row.id, orderLineId, quantity });
+        addDispatched.run({ id: orderLineId, quantity });
+      }
     },
 
     /** What the living orders of an account have not been invoiced for, whether it reserves or not. */

@@ -86,7 +86,17 @@ function write(
   const id = newId();
   const at = clock();
   const { personId } = actor;
-  stores.receipts.insertAllocation({ id, receiptId: receipt.id, invoiceId: invoice.id, amountMinor, discountMinor, at, personId });
+  stores.receipts.insertAllocation({
+    id,
+    receiptId: receipt.id,
+    invoiceId: invoice.id,
+    amountMinor,
+    discountMinor,
+    at,
+    personId,
+    reversedAt: null,
+    reversedReason: null,
+  });
   stores.receipts.addToUnapplied(receipt.id, -amountMinor);
   stores.invoices.addToOpen(invoice.id, -(amountMinor + discountMinor));
   const { fabricatorId, tradeAccountId, currency } = receipt;

@@ -1,4 +1,4 @@
-import { and, asc, desc, eq, getTableColumns, gte, isNull, lt, or, type SQL, sql } from 'drizzle-orm';
+import { and, asc, desc, eq, getTableColumns, gte, isNull, lt, type SQL, sql } from 'drizzle-orm';
 import { alias } from 'drizzle-orm/sqlite-core';
 import { type Db } from '../database/open-database';
 import { companies } from '../database/schema/companies';
@@ -56,24 +56,52 @@ export function invoiceStore(db: Db) {
     .from(invoices)
     .where(and(eq(invoices.tradeAccountId, sql.placeholder('account')), lt(invoices.dueOn, sql.placeholder('day')), isOpen))
     .prepare();
-  const byId = db
-    .select()
+  const id = sql.placeholder('id');
+  const byId = db.select().from(invoices).where(eq(invoices.id, id)).prepare();
+  const row = Object.fromEntries(Object.keys(getTableColumns(invoices)).map((name) => [name, sql.placeholder(name)]));
+  const insert = db
+    .insert(invoices)
+    .values(row as unknown as InvoiceRow)
+    .prepare();
+  const ofOrder = db.select().from(invoices).where(eq(invoices.orderId, id)).orderBy(asc(invoices.sequence)).prepare();
+  const newestOfOrder = db
+    .select({ id: invoices.id })
     .from(invoices)
-    .where(eq(invoices.id, sql.placeholder('id')))
+    .where(eq(invoices.orderId, id))
+    .orderBy(desc(invoices.sequence))
+    .limit(1)
+    .prepare();
+  const discountTaken = db
+    .select({ minor: sql<number>`coalesce(sum(${allocations.discountMinor}), 0)` })
+    .from(allocations)
+    .where(and(eq(allocations.invoiceId, id), isNull(allocations.reversedAt)))
+    .prepare();
+  const read = db
+    .select({
+      invoice: invoices,
+      ...names,
+      orderNumber: orders.number,
+      poNumber: orders.poNumber,
+      shipTo: orders.shipTo,
+      dispatchNumber: dispatches.number,
+    })
+    .from(invoices)
+    .innerJoin(dealers, eq(dealers.id, invoices.dealerId))
+    .innerJoin(makers, eq(makers.id, invoices.fabricatorId))
+    .innerJoin(orders, eq(orders.id, invoices.orderId))
+    .innerJoin(dispatches, eq(dispatches.id, invoices.dispatchId))
+    .where(eq(invoices.id, id))
     .prepare();
 
   return {
-    insert: (row: typeof invoices.$inferInsert) => db.insert(invoices).values(row).run(),
+    insert: (row: InvoiceRow) => insert.run({ ...row }),
 
     byId: (id: string): InvoiceRow | undefined => byId.get({ id }),
 
     /** Invoices of an order in the order of issue. */
-    ofOrder: (orderId: string): InvoiceRow[] =>
-      db.select().from(invoices).where(eq(invoices.orderId, orderId)).orderBy(asc(invoices.sequence)).all(),
+    ofOrder: (orderId: string): InvoiceRow[] => ofOrder.all({ id: orderId }),
 
-    newestOfOrder: (orderId: string): string | undefined =>
-      db.select({ id: invoices.id }).from(invoices).where(eq(invoices.orderId, orderId)).orderBy(desc(invoices.sequence)).limit(1).get()
-        ?.id,
+    newestOfOrder: (orderId: string): string | undefined => newestOfOrder.get({ id: orderId })?.id,
 
     /** Adds signed minor units to what is open; the database refuses to go below zero or above the total. */
     addToOpen: (id: string, change: number) => addToOpen.run({ id, change }),
@@ -82,31 +110,13 @@ export function invoiceStore(db: Db) {
     overdueMinor: (tradeAccountId: string, day: string): number => overdue.get({ account: tradeAccountId, day })?.minor ?? 0,
 
     /** Early-payment discount taken on an invoice by allocations that stand. */
-    discountTakenMinor: (invoiceId: string): number =>
-      db
-        .select({ minor: sql<number>`coalesce(sum(${allocations.discountMinor}), 0)` })
-        .from(allocations)
-        .where(and(eq(allocations.invoiceId, invoiceId), isNull(allocations.reversedAt)))
-        .get()?.minor ?? 0,
+    discountTakenMinor: (invoiceId: string): number => discountTaken.get({ id: invoiceId })?.minor ?? 0,
 
     /** An invoice that the company is a party of, with what it stands on. */
-    read: (companyId: string, id: string) =>
-      db
-        .select({
-          invoice: invoices,
-          ...names,
-          orderNumber: orders.number,
-          poNumber: orders.poNumber,
-          shipTo: orders.shipTo,
-          dispatchNumber: dispatches.number,
-        })
-        .from(invoices)
-        .innerJoin(dealers, eq(dealers.id, invoices.dealerId))
-        .innerJoin(makers, eq(makers.id, invoices.fabricatorId))
-        .innerJoin(orders, eq(orders.id, invoices.orderId))
-        .innerJoin(dispatches, eq(dispatches.id, invoices.dispatchId))
-        .where(and(eq(invoices.id, id), or(eq(invoices.dealerId, companyId), eq(invoices.fabricatorId, companyId))))
-        .get(),
+    read: (companyId: string, id: string) => {
+      const found = read.get({ id });
+      return found && (found.invoice.dealerId === companyId || found.invoice.fabricatorId === companyId) ? found : undefined;
+    },
 
     /** Open ones by the earliest due day, others by the latest; those after (due day, id). */
     page: (filter: InvoiceFilter, after: [string, string] | undefined, limit: number) => {

@@ -45,21 +45,17 @@ export function ledgerStore(db: Db) {
     .set({ closed: true })
     .where(eq(ledgerEntries.id, place('id')))
     .prepare();
-  const withPostings = (rows: (typeof ledgerEntries.$inferSelect)[]): Entry[] => {
-    if (rows.length === 0) return [];
-    const found = db
-      .select()
-      .from(postings)
-      .where(
-        inArray(
-          postings.entryId,
-          rows.map(({ id }) => id),
-        ),
-      )
-      .orderBy(postings.entryId, postings.position)
-      .all();
-    return rows.map((row) => ({ ...row, postings: found.filter(({ entryId }) => entryId === row.id) }));
-  };
+  const entriesOf = db
+    .select()
+    .from(ledgerEntries)
+    .where(and(eq(ledgerEntries.documentKind, place('documentKind')), eq(ledgerEntries.documentId, place('documentId'))))
+    .prepare();
+  const postingsOf = db
+    .select()
+    .from(postings)
+    .where(eq(postings.entryId, place('id')))
+    .orderBy(postings.position)
+    .prepare();
   const net = sql<number>`coalesce(sum(${postings.debitMinor} - ${postings.creditMinor}), 0)`;
 
   return {
@@ -70,32 +66,23 @@ export function ledgerStore(db: Db) {
       close.run({ id: entry.id });
     },
 
-    /** Entries of one document in the order of posting. */
+    /** Entries of documents of one kind in the order of posting. */
     entriesOf: (documentKind: Entry['documentKind'], documentIds: readonly string[]): Entry[] =>
-      documentIds.length === 0
-        ? []
-        : withPostings(
-            db
-              .select()
-              .from(ledgerEntries)
-              .where(and(eq(ledgerEntries.documentKind, documentKind), inArray(ledgerEntries.documentId, [...documentIds])))
-              .all()
-              .sort((a, b) => a.sequence - b.sequence),
-          ),
+      documentIds
+        .flatMap((documentId) => entriesOf.all({ documentKind, documentId }))
+        .map((entry) => ({ ...entry, postings: postingsOf.all({ id: entry.id }) }))
+        .sort((one, other) => one.sequence - other.sequence),
 
     /** Entries of a trade account before a sequence number, the latest first. */
     entriesBefore: (tradeAccountId: string, before: number | undefined, limit: number): Entry[] =>
-      withPostings(
-        db
-          .select()
-          .from(ledgerEntries)
-          .where(
-            and(eq(ledgerEntries.tradeAccountId, tradeAccountId), before === undefined ? undefined : lt(ledgerEntries.sequence, before)),
-          )
-          .orderBy(desc(ledgerEntries.sequence))
-          .limit(limit)
-          .all(),
-      ),
+      db
+        .select()
+        .from(ledgerEntries)
+        .where(and(eq(ledgerEntries.tradeAccountId, tradeAccountId), before === undefined ? undefined : lt(ledgerEntries.sequence, before)))
+        .orderBy(desc(ledgerEntries.sequence))
+        .limit(limit)
+        .all()
+        .map((entry) => ({ ...entry, postings: postingsOf.all({ id: entry.id }) })),
 
     /** Receivable less unapplied cash of a trade account after its entries up to this sequence number. */
     accountBalanceAt: (tradeAccountId: string, sequence: number): number =>

@@ -1,4 +1,4 @@
-import { and, asc, desc, eq, isNull, sql } from 'drizzle-orm';
+import { and, asc, desc, eq, getTableColumns, isNull, sql } from 'drizzle-orm';
 import { type Db } from '../database/open-database';
 import { companies, people, tradeAccounts } from '../database/schema/companies';
 import { allocations, invoices, receipts } from '../database/schema/receivables';
@@ -47,21 +47,25 @@ export function receiptStore(db: Db) {
     .where(eq(receipts.id, sql.placeholder('id')))
     .prepare();
 
+  const id = sql.placeholder('id');
+  const insert = db.insert(receipts).values(placeholdersOf(receipts)).prepare();
+  const insertAllocation = db.insert(allocations).values(placeholdersOf(allocations)).prepare();
+  const read = named().where(eq(receipts.id, id)).prepare();
+  const ofReceipt = allocated().where(eq(allocations.receiptId, id)).orderBy(asc(allocations.at), asWritten).prepare();
+  const ofInvoice = allocated().where(eq(allocations.invoiceId, id)).orderBy(asc(allocations.at), asWritten).prepare();
+  const ofFabricator = (fabricatorId: string, receiptId: string) => {
+    const found = read.get({ id: receiptId });
+    return found?.receipt.fabricatorId === fabricatorId ? found : undefined;
+  };
+
   return {
-    insert: (row: typeof receipts.$inferInsert) => db.insert(receipts).values(row).run(),
+    insert: (row: ReceiptRow) => insert.run({ ...row }),
 
     /** A receipt of this fabricator. */
-    of: (fabricatorId: string, id: string): ReceiptRow | undefined =>
-      db
-        .select()
-        .from(receipts)
-        .where(and(eq(receipts.id, id), eq(receipts.fabricatorId, fabricatorId)))
-        .get(),
+    of: (fabricatorId: string, receiptId: string): ReceiptRow | undefined => ofFabricator(fabricatorId, receiptId)?.receipt,
 
-    read: (fabricatorId: string, id: string) =>
-      named()
-        .where(and(eq(receipts.id, id), eq(receipts.fabricatorId, fabricatorId)))
-        .get(),
+    /** The same with the names that stand on it. */
+    read: ofFabricator,
 
     /** The newest first; those after (recorded at, id). */
     page: (filter: ReceiptFilter, after: [number, string] | undefined, limit: number) =>
@@ -85,7 +89,7 @@ export function receiptStore(db: Db) {
     markReversed: (id: string, reversedAt: number, reversedReason: string) =>
       db.update(receipts).set({ reversedAt, reversedReason, unappliedMinor: 0 }).where(eq(receipts.id, id)).run(),
 
-    insertAllocation: (row: typeof allocations.$inferInsert) => db.insert(allocations).values(row).run(),
+    insertAllocation: (row: AllocationRow) => insertAllocation.run({ ...row }),
 
     /** An allocation of a receipt of this fabricator. */
     allocationOf: (fabricatorId: string, id: string): AllocationRow | undefined =>
@@ -107,11 +111,16 @@ export function receiptStore(db: Db) {
     markAllocationReversed: (id: string, reversedAt: number, reversedReason: string) =>
       db.update(allocations).set({ reversedAt, reversedReason }).where(eq(allocations.id, id)).run(),
 
-    allocationsOfReceipt: (receiptId: string) =>
-      allocated().where(eq(allocations.receiptId, receiptId)).orderBy(asc(allocations.at), asWritten).all(),
+    allocationsOfReceipt: (receiptId: string) => ofReceipt.all({ id: receiptId }),
 
-    allocationsOfInvoice: (invoiceId: string) =>
-      allocated().where(eq(allocations.invoiceId, invoiceId)).orderBy(asc(allocations.at), asWritten).all(),
+    allocationsOfInvoice: (invoiceId: string) => ofInvoice.all({ id: invoiceId }),
   };
 }
 export type AllocatedRow = ReturnType<ReturnType<typeof receiptStore>['allocationsOfReceipt']>[number];
+
+/** A placeholder for each column of a table, named as in code. */
+function placeholdersOf<T extends typeof receipts | typeof allocations>(table: T) {
+  return Object.fromEntries(
+    Object.keys(getTableColumns(table)).map((name) => [name, sql.placeholder(name)]),
+  ) as unknown as T['$inferInsert'];
+}
