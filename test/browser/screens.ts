@@ -28,9 +28,9 @@ export interface Screen {
   /** what is done on it before it is looked at, such as opening a dialog */
   then?: (page: Page) => Promise<void>;
   /** whether it can be there with no data at all */
-  hasNone?: true;
+  hasNone?: boolean;
   /** where nobody needs to sign in */
-  isPublic?: true;
+  isPublic?: boolean;
 }
 
 interface Found {
@@ -45,6 +45,8 @@ const dealer = ['buyer', 'dealer admin'] as const;
 const fabricator = ['sales', 'accounts', 'plant', 'fabricator admin'] as const;
 const clerks = ['accounts', 'fabricator admin'] as const;
 const plant = ['plant', 'fabricator admin'] as const;
+
+const shownTo = (seenBy: readonly Person[], list: Omit<Screen, 'seenBy'>[]): Screen[] => list.map((screen) => ({ ...screen, seenBy }));
 
 /** The address of the first thing that a list answers. @throws Error when it is empty: then the screen cannot be seen */
 const first =
@@ -78,13 +80,13 @@ const example = '/bench?size=36.5x48.25in&units=6&make=clear-3:tempered,16:argon
 const triple =
   '/bench?size=927x1226mm&make=clear-4:tempered:low-e-soft@2,14:krypton:warm-edge,clear-4,14:krypton:warm-edge,clear-4:tempered:low-e-soft@5&place=door:yes,bottom:200mm,top:2000mm';
 
-const publicScreens: Screen[] = [
+const publicScreens = shownTo(everyone, [
   { name: 'front', path: '/', heading: /Sealed units, made to size/, hasNone: true },
   { name: 'catalogue', path: '/catalogue', heading: /Catalogue/, hasNone: true },
   { name: 'how-a-unit-is-made', path: '/catalogue/how-a-unit-is-made', heading: /How a sealed unit is made/ },
   { name: 'sizes', path: '/catalogue/sizes', heading: /./ },
   { name: 'questions', path: '/catalogue/questions', heading: /./ },
-  { name: 'makers', path: '/catalogue/makers', heading: /./, hasNone: true as const },
+  { name: 'makers', path: '/catalogue/makers', heading: /./, hasNone: true },
   { name: 'maker', path: '/catalogue/makers/northmere', heading: /Northmere/ },
   ...catalogueParts.flatMap(({ slug, key }) => [
     { name: slug, path: `/catalogue/${slug}`, heading: /./ },
@@ -99,7 +101,7 @@ const publicScreens: Screen[] = [
   ]),
   { name: 'not-in-the-catalogue', path: '/catalogue/glass/none-such', heading: /./ },
   { name: 'catalogue-out-of-reach', path: '/catalogue/out-of-reach', heading: /./ },
-  { name: 'bench', path: example, heading: /Bench/, hasNone: true as const },
+  { name: 'bench', path: example, heading: /Bench/, hasNone: true },
   { name: 'bench-triple', path: triple, heading: /Bench/ },
   {
     name: 'bench-too-large',
@@ -129,9 +131,9 @@ const publicScreens: Screen[] = [
   { name: 'bench-keys', path: example, heading: /Bench/, then: press(/^Keys/) },
   { name: 'sign-in', path: '/sign-in', heading: /Sign in/ },
   { name: 'nothing-here', path: '/no-such-place', heading: /./ },
-].map((screen) => ({ ...screen, seenBy: everyone, isPublic: true as const }));
+]).map((screen) => ({ ...screen, isPublic: true }));
 
-const dealerScreens: Screen[] = [
+const dealerScreens = shownTo(dealer, [
   { name: 'quotes', path: '/quotes', heading: /Quotes/, hasNone: true },
   { name: 'quotes-nothing-fits', path: '/quotes?q=none-such', heading: /Quotes/ },
   { name: 'quote-open', path: first('/api/quotes?state=open&limit=1', (id) => `/quotes/${id}`), heading: /^Quote/ },
@@ -149,21 +151,24 @@ const dealerScreens: Screen[] = [
   { name: 'money', path: '/money', heading: /Money/, hasNone: true },
   { name: 'money-invoice-open', path: first('/api/invoices?state=open&limit=1', (id) => `/money/invoices/${id}`), heading: /^Invoice/ },
   { name: 'money-invoice-paid', path: first('/api/invoices?state=paid&limit=1', (id) => `/money/invoices/${id}`), heading: /^Invoice/ },
-].map((screen) => ({ ...screen, seenBy: dealer }) as Screen);
+]);
 
-const orderScreens: Screen[] = [
-  { name: 'orders', path: '/orders', heading: /Orders/, hasNone: true as const },
-  { name: 'orders-nothing-fits', path: '/orders?q=none-such', heading: /Orders/ },
-  ...(['submitted', 'in production', 'closed', 'cancelled'] as const).map((state) => ({
-    name: `order-${state.replace(' ', '-')}`,
-    path: first(`/api/orders?state=${encodeURIComponent(state)}&limit=1`, (id) => `/orders/${id}`),
-    heading: /^Order/,
-  })),
-  { name: 'order-line', path: first('/api/orders?limit=1', (id) => `/orders/${id}`), heading: /^Order/, then: openLine },
-].map((screen) => ({ ...screen, seenBy: [...dealer, ...fabricator] }));
+const orderScreens = shownTo(
+  [...dealer, ...fabricator],
+  [
+    { name: 'orders', path: '/orders', heading: /Orders/, hasNone: true },
+    { name: 'orders-nothing-fits', path: '/orders?q=none-such', heading: /Orders/ },
+    ...(['submitted', 'in production', 'closed', 'cancelled'] as const).map((state) => ({
+      name: `order-${state.replace(' ', '-')}`,
+      path: first(`/api/orders?state=${encodeURIComponent(state)}&limit=1`, (id) => `/orders/${id}`),
+      heading: /^Order/,
+    })),
+    { name: 'order-line', path: first('/api/orders?limit=1', (id) => `/orders/${id}`), heading: /^Order/, then: openLine },
+  ],
+);
 
-const plantScreens: Screen[] = [
-  { name: 'plant', path: '/plant', heading: /To make/, hasNone: true as const },
+const plantScreens = shownTo(plant, [
+  { name: 'plant', path: '/plant', heading: /To make/, hasNone: true },
   {
     name: 'plant-dispatch',
     path: first(`/api/orders?state=${encodeURIComponent('in production')}&limit=1`, (id) => `/plant/orders/${id}`),
@@ -177,13 +182,13 @@ const plantScreens: Screen[] = [
     path: first('/api/orders?state=closed&limit=1', (id) => `/plant/orders/${id}`),
     heading: /^Order/,
   },
-].map((screen) => ({ ...screen, seenBy: plant }));
+]);
 
 const openInvoice = async (read: Read) => {
   const [invoice] = (await read<{ items: (Item & { tradeAccount: string })[] }>('/api/invoices?state=open&limit=1')).items;
   return invoice!;
 };
-const clerkScreens: Screen[] = [
+const clerkScreens = shownTo(clerks, [
   { name: 'receivables-invoices', path: '/receivables/invoices', heading: /Invoices/, hasNone: true },
   {
     name: 'receivables-invoice-open',
@@ -216,7 +221,7 @@ const clerkScreens: Screen[] = [
   { name: 'receivables-account', path: '/receivables/accounts/ottery.northmere', heading: /Ottery/ },
   { name: 'receivables-limit', path: '/receivables/accounts/ottery.northmere', heading: /Ottery/, then: press('Change limit') },
   { name: 'trial-balance', path: '/receivables/trial-balance', heading: /Trial balance/, hasNone: true },
-].map((screen) => ({ ...screen, seenBy: clerks }) as Screen);
+]);
 
 /** Every screen there is, in the states that look different, and who sees it. */
 export const screens: readonly Screen[] = [
@@ -228,3 +233,15 @@ export const screens: readonly Screen[] = [
   ...clerkScreens,
   { name: 'market', path: '/market', heading: /./, seenBy: ['operator'], hasNone: true },
 ];
+
+/**
+ * The screens worth checking as someone: those that need a sign-in, the Bench, which shows prices
+ * to some, and the front page for its head. The other public pages are the same for everybody.
+ */
+export function screensToCheck(person: Person): Screen[] {
+  return screens.filter(
+    ({ seenBy, isPublic, name }) =>
+      seenBy.includes(person) &&
+      (person === 'visitor' || !isPublic || name === 'front' || (person === 'buyer' && name.startsWith('bench'))),
+  );
+}

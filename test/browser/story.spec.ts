@@ -68,7 +68,8 @@ describe.each([
     await page.getByRole('navigation', { name: 'Places' }).getByRole('link', { name: 'Bench' }).click();
     await page.getByLabel('Width', { exact: true }).fill('30 1/2');
     await page.getByLabel('Height', { exact: true }).fill('45');
-    await page.getByRole('img', { name: /30 1\/2 in.*45 in/ }).waitFor();
+    const elevation = page.getByRole('img', { name: 'Elevation' });
+    for (const side of ['30 1/2 in', '45 in']) await elevation.getByText(side, { exact: true }).waitFor();
     const offers = page.getByRole('region', { name: 'Offers' });
     for (const maker of MAKERS) await offers.getByText(maker).waitFor();
     expect(await page.getByRole('region', { name: 'Drawings and results' }).innerText()).toMatch(/U-value, EN 673\s+\d\.\d\d/);
@@ -135,27 +136,23 @@ describe.each([
     const width = page.getByLabel('Width', { exact: true });
     await page.getByLabel('Tag').fill('Bay, left');
     await page.getByLabel('Tag').press('Enter');
-    await offers.getByText(/6 × 36 1\/2 × 48 1\/4.*begins/).waitFor();
-    for (const [w, h, many] of [
-      ['24', '36', '2'],
-      ['30 1/4', '60', '1'],
-    ] as const) {
+    await offers.getByText(/6 × 36 1\/2 × 48 1\/4.*line 1 of/).waitFor();
+    for (const { w, h, many, line } of [
+      { w: '24', h: '36', many: '2', line: 2 },
+      { w: '30 1/4', h: '60', many: '1', line: 3 },
+    ]) {
       await width.fill(w);
       await page.getByLabel('Height', { exact: true }).fill(h);
       await page.getByLabel('How many').fill(many);
       await page.getByLabel('How many').press('Enter');
-      await offers.getByText(new RegExp(`${many} × ${w} × ${h}.*added to`)).waitFor();
+      await offers.getByText(new RegExp(`${many} × ${w} × ${h}.*line ${line} of`)).waitFor();
       expect(await width.evaluate((field) => field === document.activeElement)).toBe(true);
     }
-    await offers.getByText('3 lines').waitFor();
   });
 
   chapter('gives the quote a customer and a mark-up, mails it retail and reads it in the local mailbox', async () => {
     const { page } = buyer;
-    await page
-      .getByRole('region', { name: 'Offers' })
-      .getByRole('link', { name: /^[A-Z]+-?\w*\d+$/ })
-      .click();
+    await page.getByRole('region', { name: 'Offers' }).getByRole('link', { name: /^Q-/ }).click();
     await page.getByRole('heading', { level: 1, name: /^Quote/ }).waitFor();
     await page.getByLabel('Customer').fill('Wren Cottage');
     await page.getByLabel('E-mail').fill('wren@cottage.example');
