@@ -1,4 +1,3 @@
-import * as z from 'zod';
 import { catalogueSchema } from './catalogue';
 import { endpoint } from './endpoint';
 import { evaluateRequest, evaluationSchema } from './evaluation';

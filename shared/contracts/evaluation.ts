@@ -22,12 +22,9 @@ export const reasonSchema = z.object({
   actual: z.string(),
   nearest: z.string().nullable().meta({ description: 'nearest value that would pass, in the units of `actual`' }),
   /** All the nearest values of one maker, set together, pass together. */
-  nearestValue: z
-    .string()
-    .nullable()
-    .meta({
-      description: 'what to write at `pointer` to pass: mm as a decimal string, an identity or a number; null when no one field does',
-    }),
+  nearestValue: z.string().nullable().meta({
+    description: 'what to write at `pointer` to pass: mm as a decimal string, an identity or a number; null when no one field does',
+  }),
   pointer: z.string().meta({ description: 'JSON pointer into the unit: the field that causes it' }),
 });
 export type Reason = z.infer<typeof reasonSchema>;

@@ -1,4 +1,4 @@
-import { DOCUMENT, ErrorHandler, inject, Injectable } from '@angular/core';
+import { DOCUMENT, type ErrorHandler, inject, Injectable } from '@angular/core';
 
 const CHUNK_GONE =
   /Failed to fetch dynamically imported module|error loading dynamically imported module|Importing a module script failed/i;

@@ -23,7 +23,8 @@ async function run(): Promise<void> {
     if (wanted.length > 0 && !wanted.includes(name)) continue;
     console.log(`measuring ${name}…`);
     const found = await measure();
-    for (const { measure: what, ratio, toReach, reached } of found) console.log(`  ${reached ? 'reached' : 'SHORT  '}  ${what}: ${ratio} (to reach: ${toReach})`);
+    for (const { measure: what, ratio, toReach, reached } of found)
+      console.log(`  ${reached ? 'reached' : 'SHORT  '}  ${what}: ${ratio} (to reach: ${toReach})`);
     measures.push(...found);
   }
   // A part of the measures does not replace the record of all of them.
@@ -31,7 +32,9 @@ async function run(): Promise<void> {
 }
 
 function page(measures: readonly Measure[]): string {
-  const rows = measures.map(({ measure, ratio, toReach, reached, detail }) => `| ${measure} | ${ratio} | ${toReach} | ${reached ? 'yes' : '**no**'} | ${detail} |`);
+  const rows = measures.map(
+    ({ measure, ratio, toReach, reached, detail }) => `| ${measure} | ${ratio} | ${toReach} | ${reached ? 'yes' : '**no**'} | ${detail} |`,
+  );
   return `# Measures
 
 Written by \`npm run bench\`. Machines are noisy, so each is a ratio within one run where that can be; none is asserted in a test.

@@ -92,9 +92,8 @@ export async function marketFactory(
 
 function caller(app: Express, own: Record<string, string>): Caller {
   const send: Caller['send'] = async (method, path, raw, headers = {}) => {
-    const call = request(app)
-      [method](path)
-      .set({ ...own, ...headers });
+    const agent = request(app);
+    const call = agent[method](path).set({ ...own, ...headers });
     const answer = await (raw === undefined ? call : call.send(raw));
     return {
       status: answer.status,
