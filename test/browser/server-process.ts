@@ -80,7 +80,8 @@ function stopServer(server: ChildProcess): Promise<number | null> {
   });
 }
 
-function freePort(): Promise<number> {
+/** A port that nobody listens on just now. */
+export function freePort(): Promise<number> {
   return new Promise((resolve, reject) => {
     const probe = createServer();
     probe.once('error', reject);

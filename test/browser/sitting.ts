@@ -3,8 +3,8 @@ import { type Browser, type BrowserContextOptions, chromium, type Page } from 'p
 
 const CHROMIUM = '/usr/bin/chromium';
 
-/** @throws Error with the command to run when Chromium is missing */
-export function launchBrowser(): Promise<Browser> {
+/** @param flags of Chromium, beside the usual ones. @throws Error with the command to run when Chromium is missing */
+export function launchBrowser(flags: readonly string[] = []): Promise<Browser> {
   if (!existsSync(CHROMIUM)) throw new Error('The browser tests need Chromium: apt-get install chromium');
   return chromium.launch({
     executablePath: CHROMIUM,
@@ -16,6 +16,7 @@ export function launchBrowser(): Promise<Browser> {
       '--disable-background-networking',
       '--disable-component-update',
       '--disable-sync',
+      ...flags,
     ],
   });
 }
