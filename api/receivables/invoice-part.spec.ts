@@ -117,7 +117,7 @@ describe('the invoices of an order', () => {
     );
   });
 
-  it('spread a delivery of 100.00 over three equal parts as 33.34, 33.33, 33.33, the cent first', () => {
+  it('spread a delivery of 100.00 over three equal parts as 33.33, 33.34, 33.33', () => {
     const lines = [{ unitPriceMinor: 5_000, quantity: 3 }];
     const order = orderOf(lines, [{ family: 'delivery', minor: 10_000 }], []);
     const parts = invoiceAll(order, lines, [[1], [1], [1]], []);
