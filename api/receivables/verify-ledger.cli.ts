@@ -10,7 +10,9 @@ try {
   for (const { check, row, expected, found: stands } of found) {
     console.log(`${check}: ${row} says ${stands}, its sources say ${expected}`);
   }
-  console.log(found.length === 0 ? `All ${ledgerChecks.length} checks agree.` : `${found.length} of ${ledgerChecks.length} checks disagree.`);
+  console.log(
+    found.length === 0 ? `All ${ledgerChecks.length} checks agree.` : `${found.length} of ${ledgerChecks.length} checks disagree.`,
+  );
   process.exitCode = found.length === 0 ? 0 : 1;
 } finally {
   database.close();
