@@ -1,6 +1,7 @@
 import { type Exact, exact } from '@shared/money/exact';
 import { type Charge, decimalText } from './charge';
 import { type CompiledList } from './compile-list';
+import { type Measures } from './measures';
 
 const ZERO = 48;
 
@@ -13,7 +14,7 @@ export interface Side {
   steps: number;
 }
 
-/** What one rate comes to at one billed size under one dealer's terms. */
+/** What one rate comes to at one billed area or perimeter under one dealer's terms. */
 export interface RatedCharge {
   listMinor: number;
   netMinor: number;
@@ -21,26 +22,31 @@ export interface RatedCharge {
   rows: (Charge | undefined)[];
 }
 
-/** What a unit is billed by: its bounding rectangle, each side rounded up to the increment. */
-export interface BilledSize {
-  /** the list's unit of size */
-  width: Exact;
-  height: Exact;
-  /** exact parts of area, in² or mm², not below the list's minimum */
-  areaParts: Exact;
-  /** exact parts of length, in or mm */
-  perimeterParts: Exact;
+/** A billed area or perimeter. */
+export interface Billed {
+  /** exact parts, in² or mm², in or mm */
+  parts: Exact;
   /** ft² or m², ft or m: as the charge sheet says it */
-  areaText: string;
-  perimeterText: string;
-  /** what was charged at this size already, the same terms given, by number of the rule */
+  text: string;
+  /** what was charged on it already, the same terms given, by number of the rule */
   charged: (RatedCharge | undefined)[];
 }
 
+/** Areas and perimeters billed before, by their number of increments: for one list and one dealer's terms. */
+export interface BilledBefore {
+  sides: Map<string, Side>;
+  areas: Map<number, Billed>;
+  perimeters: Map<number, Billed>;
+}
+
 /** A side given in mm, billed in whole increments, rounded up. */
-export function billSide(side: string, { measures: { increment } }: CompiledList): Side {
+export function billSide(side: string, { measures }: CompiledList, before?: BilledBefore): Side {
+  const known = before?.sides.get(side);
+  if (known) return known;
   const mm = exact(side);
-  return { mm, text: plainText(side), steps: stepsOf(mm, increment) };
+  const billed = { mm, text: plainText(side), steps: stepsOf(mm, measures) };
+  before?.sides.set(side, billed);
+  return billed;
 }
 
 /** A decimal string without needless zeros: `0914.40` → `914.4`. */
@@ -50,26 +56,37 @@ function plainText(text: string): string {
 }
 
 /** A length in mm as whole increments, rounded up. */
-export function stepsOf(mm: Exact, increment: Exact): number {
-  const whole = mm.dividedToIntegerBy(increment);
+export function stepsOf(mm: Exact, { increment, incrementTop, incrementBottom }: Measures): number {
+  const whole = mm.times(incrementBottom).dividedToIntegerBy(incrementTop);
   const steps = whole.toNumber();
   return whole.times(increment).lessThan(mm) ? steps + 1 : steps;
 }
 
-/** The billed size of so many increments of width and height. */
-export function billSize(widthSteps: number, heightSteps: number, { measures, ruleCount }: CompiledList): BilledSize {
-  const width = measures.incrementSize.times(widthSteps);
-  const height = measures.incrementSize.times(heightSteps);
-  const product = width.times(height);
-  const areaParts = product.lessThan(measures.minimumArea) ? measures.minimumArea : product;
-  const perimeterParts = width.plus(height).times(2);
-  return {
-    width,
-    height,
-    areaParts,
-    perimeterParts,
-    areaText: decimalText(areaParts.dividedBy(measures.areaParts)),
-    perimeterText: decimalText(perimeterParts.dividedBy(measures.lengthParts)),
-    charged: new Array<undefined>(ruleCount),
-  };
+/** Width × height as billed, not below the list's minimum. */
+export function billArea(width: Side, height: Side, { measures, ruleCount }: CompiledList, before?: BilledBefore): Billed {
+  const steps = wholeSteps(width.steps * height.steps);
+  const known = before?.areas.get(steps);
+  if (known) return known;
+  const product = measures.incrementArea.times(steps);
+  const parts = product.lessThan(measures.minimumArea) ? measures.minimumArea : product;
+  const billed = { parts, text: decimalText(parts.dividedBy(measures.areaParts)), charged: new Array<undefined>(ruleCount) };
+  before?.areas.set(steps, billed);
+  return billed;
+}
+
+/** 2 × (width + height) as billed. */
+export function billPerimeter(width: Side, height: Side, { measures, ruleCount }: CompiledList, before?: BilledBefore): Billed {
+  const steps = wholeSteps(2 * (width.steps + height.steps));
+  const known = before?.perimeters.get(steps);
+  if (known) return known;
+  const parts = measures.incrementSize.times(steps);
+  const billed = { parts, text: decimalText(parts.dividedBy(measures.lengthParts)), charged: new Array<undefined>(ruleCount) };
+  before?.perimeters.set(steps, billed);
+  return billed;
+}
+
+/** Counts of increments are whole numbers; beyond 2⁵³ they would stop being so. */
+function wholeSteps(steps: number): number {
+  if (!Number.isSafeInteger(steps)) throw new RangeError('a size of too many increments');
+  return steps;
 }

@@ -110,8 +110,8 @@ function standardSizesOf(list: CompiledList): readonly Size[] {
 }
 
 /** The largest size below the last increment begun, in height, in width and in both. */
-function incrementsBelow({ width, height }: Size, { measures: { increment } }: CompiledList): Size[] {
-  const below = (side: Exact) => increment.times(stepsOf(side, increment) - 1);
+function incrementsBelow({ width, height }: Size, { measures }: CompiledList): Size[] {
+  const below = (side: Exact) => measures.increment.times(stepsOf(side, measures) - 1);
   const lower = { width: below(width), height: below(height) };
   const sizes = [
     { width, height: lower.height },

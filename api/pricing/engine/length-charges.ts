@@ -17,13 +17,13 @@ export function chargeSpacer(hand: UnitInHand): void {
 
 /** The length of all bars, upright ones as long as the billed height, level ones as the billed width; and each crossing. */
 export function chargeGrid(hand: UnitInHand): void {
-  const { unit, list, size } = hand;
+  const { unit, list, width, height } = hand;
   if (!unit.grid || unit.grid.across + unit.grid.down === 0) return;
   const { bar, across, down } = unit.grid;
   const rules = list.grids.get(bar);
   if (!rules) return refuse(hand, list.products.nameOf('grids', bar), '/grid/bar');
-  const { lengthDivisor, lengthParts, lengthUnit } = list.measures;
-  const parts = size.height.times(across).plus(size.width.times(down));
+  const { incrementSize, lengthDivisor, lengthParts, lengthUnit } = list.measures;
+  const parts = incrementSize.times(across * height.steps + down * width.steps);
   const bars = wholeQuotient(parts.times(rules.bars.factor), lengthDivisor);
   addGridCharge(hand, rules.bars, bars, decimalText(parts.dividedBy(lengthParts)), lengthUnit);
   const crossings = across * down;

@@ -30,10 +30,14 @@ export interface Measures {
   areaUnit: string;
   lengthUnit: string;
   weightUnit: string;
-  /** mm */
+  /** mm, and as a fraction of whole numbers, for dividing by few digits is fast */
   increment: Exact;
+  incrementTop: Exact;
+  incrementBottom: Exact;
   /** list's unit of size */
   incrementSize: Exact;
+  /** one increment square, parts of area */
+  incrementArea: Exact;
   /** parts of area */
   minimumArea: Exact;
 }
@@ -46,6 +50,8 @@ export function measuresOf({ measure, billing }: Pick<PriceListContent, 'measure
   const one = new Exact(1);
   const incrementSize = exact(billing.increment);
   if (incrementSize.isZero()) throw new RangeError('sizes cannot be billed in steps of nothing');
+  const increment = incrementSize.times(mm);
+  const incrementBottom = new Exact(10).pow(increment.decimalPlaces());
   return {
     mm,
     kg: exact(imperial ? KG_PER_POUND : '1'),
@@ -59,8 +65,11 @@ export function measuresOf({ measure, billing }: Pick<PriceListContent, 'measure
     areaUnit: imperial ? 'ft²' : 'm²',
     lengthUnit: imperial ? 'ft' : 'm',
     weightUnit: imperial ? 'lb' : 'kg',
-    increment: incrementSize.times(mm),
+    increment,
+    incrementTop: increment.times(incrementBottom),
+    incrementBottom,
     incrementSize,
+    incrementArea: incrementSize.times(incrementSize),
     minimumArea: exact(billing.minimumArea).times(areaParts),
   };
 }

@@ -15,17 +15,17 @@ const isAreaFamily = (family: RowFamily) => (areaFamilies as readonly RowFamily[
  * unit is the same for every dealer.
  */
 export function replaceByNetRate(hand: UnitInHand, { id, rate, factor }: { id: string; rate: string; factor: Exact }): void {
-  const { sheet, size, list } = hand;
+  const { sheet, area, list } = hand;
   const row: Charge = {
     family: 'net rate',
     label: 'net rate for this make-up',
-    quantity: size.areaText,
+    quantity: area.text,
     unit: list.measures.areaUnit,
     rate,
     listMinor: sheet.areaMinor,
     discountPercent: '0',
     discountReason: 'contract',
-    netMinor: wholeQuotient(size.areaParts.times(factor), list.measures.areaDivisor),
+    netMinor: wholeQuotient(area.parts.times(factor), list.measures.areaDivisor),
     rule: `contract/${id}`,
   };
   sheet.charges = [row, ...sheet.charges.filter(({ family }) => !isAreaFamily(family))];

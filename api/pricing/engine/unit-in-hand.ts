@@ -2,7 +2,7 @@ import { type Reason } from '@shared/contracts/evaluation';
 import { type UnitFamily } from '@shared/contracts/price-lists';
 import { type Unit } from '@shared/contracts/units';
 import { type Exact } from '@shared/money/exact';
-import { type BilledSize, type RatedCharge } from './bill-size';
+import { type Billed, type RatedCharge, type Side } from './bill-size';
 import { type Charge, type Sheet, wholeMinor } from './charge';
 import { type CompiledList, type Rule } from './compile-list';
 import { type CompiledTerms } from './compile-terms';
@@ -14,7 +14,10 @@ export interface UnitInHand {
   quantity: number;
   /** extras asked for */
   extras: readonly string[];
-  size: BilledSize;
+  width: Side;
+  height: Side;
+  area: Billed;
+  perimeter: Billed;
   list: CompiledList;
   terms: CompiledTerms;
   sheet: Sheet;
@@ -32,46 +35,34 @@ export function netOf(listMinor: number, keeps: Exact | null): number {
  * @returns the list amount
  */
 export function chargeByArea(hand: UnitInHand, rule: Rule, place: number): number {
-  const { size, list } = hand;
-  const made = size.charged[rule.number] ?? rated(hand, rule, size.areaParts, list.measures.areaDivisor);
+  const { area, list } = hand;
+  const made = area.charged[rule.number] ?? rated(hand, rule, area, list.measures.areaDivisor);
   const { minimum } = rule;
   const label = rule.labels[place] ?? '';
   hand.sheet.charges.push(
     (made.rows[place] ??=
       minimum?.minor === made.listMinor
         ? rowOf(hand, rule.family, `${label}, minimum`, '1', 'cavity', minimum.rate, made, rule.id)
-        : rowOf(hand, rule.family, label, size.areaText, list.measures.areaUnit, rule.rate, made, rule.id)),
+        : rowOf(hand, rule.family, label, area.text, list.measures.areaUnit, rule.rate, made, rule.id)),
   );
   return made.listMinor;
 }
 
 /** Charges a rate at the billed perimeter and writes its row; `place` as in `chargeByArea`. */
 export function chargeByPerimeter(hand: UnitInHand, rule: Rule, place: number): void {
-  const { size, list } = hand;
-  const made = size.charged[rule.number] ?? rated(hand, rule, size.perimeterParts, list.measures.lengthDivisor);
+  const { perimeter, list } = hand;
+  const made = perimeter.charged[rule.number] ?? rated(hand, rule, perimeter, list.measures.lengthDivisor);
   const label = rule.labels[place] ?? '';
-  const row = (made.rows[place] ??= rowOf(
-    hand,
-    rule.family,
-    label,
-    size.perimeterText,
-    list.measures.lengthUnit,
-    rule.rate,
-    made,
-    rule.id,
-  ));
+  const row = (made.rows[place] ??= rowOf(hand, rule.family, label, perimeter.text, list.measures.lengthUnit, rule.rate, made, rule.id));
   hand.sheet.charges.push(row);
 }
 
-function rated({ size, terms }: UnitInHand, rule: Rule, parts: Exact, divisor: Divisor | null): RatedCharge {
-  const amount = wholeQuotient(parts.times(rule.factor), divisor);
+function rated({ terms }: UnitInHand, rule: Rule, billed: Billed, divisor: Divisor | null): RatedCharge {
+  const amount = wholeQuotient(billed.parts.times(rule.factor), divisor);
   const listMinor = rule.minimum ? Math.max(amount, rule.minimum.minor) : amount;
-  const made: RatedCharge = {
-    listMinor,
-    netMinor: netOf(listMinor, terms.discounts[rule.family].keeps),
-    rows: new Array<undefined>(rule.labels.length),
-  };
-  size.charged[rule.number] = made;
+  const netMinor = netOf(listMinor, terms.discounts[rule.family].keeps);
+  const made: RatedCharge = { listMinor, netMinor, rows: new Array<undefined>(rule.labels.length) };
+  billed.charged[rule.number] = made;
   return made;
 }
 
