@@ -83,7 +83,7 @@ export class PageMeta {
     if (!link) {
       link = this.document.createElement('link');
       link.setAttribute('rel', 'canonical');
-      this.document.head.append(link);
+      this.document.head.appendChild(link);
     }
     link.setAttribute('href', url);
   }
@@ -95,7 +95,7 @@ export class PageMeta {
     if (!script) {
       script = this.document.createElement('script');
       script.setAttribute('type', type);
-      this.document.head.append(script);
+      this.document.head.appendChild(script);
     }
     const text = JSON.stringify({ '@context': 'https://schema.org', '@graph': things.map((thing) => this.absolute(thing)) });
     // `</script>` in a text must not end the element.
