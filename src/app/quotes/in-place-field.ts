@@ -63,7 +63,15 @@ let count = 0;
     .right {
       text-align: right;
     }
+    /* Two fields side by side share the line below for what is wrong with either. */
+    :host(.paired) {
+      display: contents;
+    }
+    :host(.paired) input {
+      grid-row: 1;
+    }
     .reason {
+      grid-column: 1 / -1;
       display: block;
       margin-top: 3px;
       color: var(--sy-error);

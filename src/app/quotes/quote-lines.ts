@@ -106,19 +106,19 @@ export class QuoteLines {
     const field = button ? null : this.host.nativeElement.ownerDocument.activeElement;
     const problem = await this.run(this.desk.editLines(moveLine(line.id, by)), `${name} moved ${by < 0 ? 'up' : 'down'}`);
     // The row has moved in the page, which takes the focus away from it.
-    if (problem === null) this.focusAfterRender(field instanceof HTMLElement ? field : this.buttonOf(line.id, by));
+    if (problem === null) this.focusAfterRender(() => (field instanceof HTMLElement ? field : this.buttonOf(line.id, by)));
   }
 
   protected async remove(row: Row): Promise<void> {
     const problem = await this.run(this.desk.remove(row.line), `${row.name} removed`);
-    if (problem === null) afterNextRender(() => this.find('.put-back')?.focus(), { injector: this.injector });
+    if (problem === null) this.focusAfterRender(() => this.find('.put-back'));
   }
 
   protected async putBack(): Promise<void> {
     const index = this.desk.removed()?.index ?? 0;
     const problem = await this.run(this.desk.putBack(), 'The line is back');
-    const line = this.quote().lines[index];
-    if (problem === null && line) afterNextRender(() => this.find(`[data-line="${line.id}"] input`)?.focus(), { injector: this.injector });
+    const line = this.desk.quote()?.lines[index];
+    if (problem === null && line) this.focusAfterRender(() => this.find(`[data-line="${line.id}"] input`));
   }
 
   /** Alt with an arrow moves the line from any of its fields. */
@@ -185,8 +185,8 @@ export class QuoteLines {
     return this.host.nativeElement.querySelector<E>(selector);
   }
 
-  private focusAfterRender(element: HTMLElement | null): void {
-    afterNextRender(() => element?.focus(), { injector: this.injector });
+  private focusAfterRender(find: () => HTMLElement | null): void {
+    afterNextRender(() => find()?.focus(), { injector: this.injector });
   }
 }
 
