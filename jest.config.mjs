@@ -2,6 +2,7 @@ const moduleNameMapper = {
   '^@shared/(.*)$': '<rootDir>/shared/$1',
   '^@api/(.*)$': '<rootDir>/api/$1',
   '^@seeds/(.*)$': '<rootDir>/seeds/$1',
+  '\\.svg$': '<rootDir>/test/svg-text.ts',
 };
 
 const serverTransform = {
@@ -37,7 +38,7 @@ export default {
       transform: {
         '^.+\\.(ts|mjs|js|html)$': ['jest-preset-angular', { tsconfig: '<rootDir>/tsconfig.json', stringifyContentPathRegex: '\\.html$' }],
       },
-      moduleNameMapper,
+      moduleNameMapper: { ...moduleNameMapper, '\\.svg$': '<rootDir>/test/svg-text.ts' },
     },
   ],
 };
