@@ -3,6 +3,7 @@ import { computed, DestroyRef, effect, inject, Injectable, PLATFORM_ID, signal, 
 import { takeUntilDestroyed } from '@angular/core/rxjs-interop';
 import { type ParamMap, type Params, Router } from '@angular/router';
 import { debounce, Subject, timer } from 'rxjs';
+import { isLeaving } from '../ui/is-leaving';
 import { ChosenMaker } from './chosen-maker';
 import { CurrentQuotes } from './current-quotes';
 import { decodeDraft, type DraftAddress, encodeDraft } from './draft-address';
@@ -66,8 +67,8 @@ export class BenchAddress {
   private async write(entry: boolean): Promise<void> {
     const wanted = this.wanted();
     if (wanted === null || same(wanted, this.known())) return;
-    // Somebody is on the way to another page: a write would call them back. If they stay after all, it is made up for.
-    if (this.router.currentNavigation() !== null) return this.writes.next('after a pause');
+    // If they stay after all, it is made up for.
+    if (isLeaving(this.router)) return this.writes.next('after a pause');
     this.known.set(wanted);
     await this.router.navigate([], { queryParams: wanted, queryParamsHandling: 'merge', replaceUrl: !entry, scroll: 'manual' });
   }

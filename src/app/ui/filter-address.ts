@@ -1,5 +1,6 @@
 import { inject } from '@angular/core';
 import { ActivatedRoute, Router } from '@angular/router';
+import { isLeaving } from './is-leaving';
 
 /**
  * Writes filters into the address, so that back, reload and a link keep them. An empty value
@@ -8,7 +9,8 @@ import { ActivatedRoute, Router } from '@angular/router';
 export function filterAddress(): (filters: Record<string, string>) => Promise<boolean> {
   const router = inject(Router);
   const route = inject(ActivatedRoute);
-  return (filters) =>
+  return async (filters) =>
+    !isLeaving(router) &&
     router.navigate([], {
       relativeTo: route,
       queryParams: Object.fromEntries(Object.entries(filters).map(([name, value]) => [name, value === '' ? null : value])),
