@@ -8,7 +8,7 @@ import { percentOf, roundToMinor } from '@shared/money/money';
 import { aldersundList, kestrelFordList, northmereList, raise } from '@seeds/demo/price-lists';
 import { catalogueFactory, unitFactory } from '../../../test/factories/catalogue-factory';
 import { lineFactory, wideSpread } from '../../../test/factories/line-factory';
-import { priceListFactory, priceTermsFactory } from '../../../test/factories/price-list-factory';
+import { priceListFactory, pricedUnitFactory as priced, priceTermsFactory } from '../../../test/factories/price-list-factory';
 import { partOf, wholeMinor } from './charge';
 import { versionInForce } from './in-force';
 import { priceLines } from './price-lines';
@@ -48,12 +48,6 @@ const anyTerms = (makeUp: string): fc.Arbitrary<PriceTerms> =>
     promotionCode: fc.constant(null),
     on: fc.constant('2026-09-15'),
   });
-
-function priced(line: LineToPrice, list = priceListFactory(), terms = priceTermsFactory()): PricedUnit {
-  const answer = priceUnit(line, list, terms, catalogue);
-  if ('refusals' in answer) throw new Error(JSON.stringify(answer.refusals));
-  return answer.priced;
-}
 
 const lineAndTerms = (content: PriceListContent) =>
   seed.chain((from) => {
