@@ -1,5 +1,7 @@
-import { ChangeDetectionStrategy, Component } from '@angular/core';
-import { RouterOutlet } from '@angular/router';
+import { ChangeDetectionStrategy, Component, inject } from '@angular/core';
+import { toSignal } from '@angular/core/rxjs-interop';
+import { NavigationEnd, Router, RouterOutlet } from '@angular/router';
+import { filter, map } from 'rxjs';
 import { Header } from './header';
 
 @Component({
@@ -7,9 +9,9 @@ import { Header } from './header';
   imports: [RouterOutlet, Header],
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
-    <a class="skip" href="#content">To the content</a>
+    <a class="skip" [href]="toContent()" (click)="content.focus(); $event.preventDefault()">To the content</a>
     <app-header />
-    <main id="content" tabindex="-1"><router-outlet /></main>
+    <main #content id="content" tabindex="-1"><router-outlet /></main>
   `,
   styles: `
     main:focus {
@@ -28,4 +30,14 @@ import { Header } from './header';
     }
   `,
 })
-export class App {}
+export class App {
+  private readonly router = inject(Router);
+  /** The whole address of this page: a bare fragment would be one of the base, which is the front page. */
+  protected readonly toContent = toSignal(
+    this.router.events.pipe(
+      filter((event) => event instanceof NavigationEnd),
+      map(() => `${this.router.url.replace(/#.*$/, '')}#content`),
+    ),
+    { initialValue: '#content' },
+  );
+}
