@@ -1,5 +1,4 @@
 import { afterNextRender, ChangeDetectionStrategy, Component, inject } from '@angular/core';
-import { Meta } from '@angular/platform-browser';
 import { CurrentCatalogue } from '../api-client/current-catalogue';
 import { ProblemNote } from '../ui/problem-note';
 import { ReaderMeasures } from './reader-measures';
@@ -41,11 +40,6 @@ export class BenchPage {
   protected readonly source = inject(CurrentCatalogue);
 
   constructor() {
-    inject(Meta).updateTag({
-      name: 'description',
-      content:
-        'Specify a made-to-size sealed unit: drawn to scale as you type, with weight, thickness, U-value, solar gain, condensation, safety glazing and who can build it.',
-    });
     const measures = inject(ReaderMeasures);
     afterNextRender(() => measures.recall());
   }

@@ -21,7 +21,9 @@ import { TakeNearest } from './take-nearest';
       font-size: 13.5px;
     }
     ul {
-      margin: 2px 0 0;
+      display: grid;
+      gap: 4px;
+      margin: 2px 0 4px;
       padding: 0;
       list-style: none;
       color: var(--sy-soft);
@@ -33,5 +35,7 @@ export class MakerReasons {
   readonly maker = input.required<string>();
   readonly reasons = input.required<readonly Reason[]>();
   /** Each once: two lites of the same glass are refused for the same reason. */
-  protected readonly details = computed(() => [...new Set(this.reasons().map(({ detail }) => detail))]);
+  protected readonly details = computed(() => [
+    ...new Set(this.reasons().map(({ detail }) => `${detail.charAt(0).toUpperCase()}${detail.slice(1)}.`)),
+  ]);
 }

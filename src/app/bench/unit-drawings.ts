@@ -15,7 +15,7 @@ import { UnitDraft } from './unit-draft';
       <app-drawing [drawing]="section()" />
     </div>
     @if (draft.behind()) {
-      <p class="mark">Drawn as it last could be: one of the fields cannot be used as it stands.</p>
+      <p class="mark">Shown as it last could be: one of the fields cannot be used as it stands.</p>
     }
   `,
   styles: `
