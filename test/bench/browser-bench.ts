@@ -43,7 +43,7 @@ async function keyToPrice(base: string): Promise<Measure> {
     const { page } = await sitDown(browser, base, 'buyer@ottery.example');
     await open(page, example);
     await page.getByRole('region', { name: 'Offers' }).getByText('$184.23').waitFor();
-    const width = page.getByLabel('Width', { exact: true });
+    const width = page.getByRole('textbox', { name: 'Width', exact: true });
     await width.press('End');
     const times: number[] = [];
     for (let key = 0; key < KEYS; key++) {

@@ -64,8 +64,9 @@ it('skips the head of the page', async () => {
   await page.getByRole('link', { name: 'To the content' }).waitFor();
   await page.keyboard.press('Enter');
   expect(await page.evaluate(() => document.activeElement?.id)).toBe('content');
+  expect(new URL(page.url()).pathname).toBe('/bench');
   await page.keyboard.press('Tab');
-  expect(await page.getByLabel('Width', { exact: true }).evaluate((field) => field === document.activeElement)).toBe(true);
+  expect(await page.getByRole('textbox', { name: 'Width', exact: true }).evaluate((field) => field === document.activeElement)).toBe(true);
 });
 
 it('goes from a size to a line of a quote', async () => {
@@ -98,7 +99,7 @@ it('goes from a size to a line of a quote', async () => {
   await page.keyboard.press('Control+Enter');
   await offers.getByText(/6 × 36 1\/2 × 48 1\/4.*line 1 of/).waitFor();
 
-  expect(await page.getByLabel('Width', { exact: true }).evaluate((field) => field === document.activeElement)).toBe(true);
+  expect(await page.getByRole('textbox', { name: 'Width', exact: true }).evaluate((field) => field === document.activeElement)).toBe(true);
   await typeOver(page, '24');
   await page.keyboard.press('Tab');
   await typeOver(page, '36');
@@ -108,7 +109,7 @@ it('goes from a size to a line of a quote', async () => {
 
 it('steps a size by the arrows, and opens and leaves the list of keys', async () => {
   const { page } = sitting;
-  const width = page.getByLabel('Width', { exact: true });
+  const width = page.getByRole('textbox', { name: 'Width', exact: true });
   await width.focus();
   await typeOver(page, '24');
   await page.keyboard.press('ArrowUp');

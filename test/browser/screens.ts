@@ -113,8 +113,8 @@ const publicScreens = shownTo(everyone, [
     path: example,
     heading: /Bench/,
     then: async (page: Page) => {
-      await page.getByLabel('Width', { exact: true }).fill('36 1/');
-      await page.getByLabel('Width', { exact: true }).press('Tab');
+      await page.getByRole('textbox', { name: 'Width', exact: true }).fill('36 1/');
+      await page.getByRole('textbox', { name: 'Width', exact: true }).press('Tab');
       await page.getByText(/as it last could be/).waitFor();
     },
   },
@@ -123,7 +123,10 @@ const publicScreens = shownTo(everyone, [
     path: example,
     heading: /Bench/,
     then: async (page: Page) => {
-      await page.getByRole('button', { name: /lite 2/ }).click();
+      await page
+        .getByRole('region', { name: 'Size and make-up' })
+        .getByRole('button', { name: /lite 2/ })
+        .click();
       await page.getByRole('button', { name: /^Doors, wet areas/ }).click();
       await page.getByText('How these are found').click();
     },

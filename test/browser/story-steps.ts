@@ -7,8 +7,9 @@ export interface Letter {
   attachments: Buffer[];
 }
 
-/** Opens the local mailbox until a mail with this subject is there, and reads it with what is attached. */
-export async function readMail(page: Page, subject: string): Promise<Letter> {
+/** Opens the local mailbox in another tab until a mail with this subject is there, and reads it with what is attached. */
+export async function readMail(beside: Page, subject: string): Promise<Letter> {
+  const page = await beside.context().newPage();
   const link = page.getByRole('link', { name: subject });
   for (let tries = 0; ; tries++) {
     await page.goto('/local/mail');
@@ -23,7 +24,9 @@ export async function readMail(page: Page, subject: string): Promise<Letter> {
     .getByRole('link')
     .evaluateAll((links) => links.map((each) => (each as HTMLAnchorElement).href));
   const attachments = await Promise.all(addresses.map(async (address) => (await page.request.get(address)).body()));
-  return { text: await page.getByRole('main').innerText(), attachments };
+  const text = await page.getByRole('main').innerText();
+  await page.close();
+  return { text, attachments };
 }
 
 /** Plant finds an order, starts its production where that is still to do, packs and sends out. */

@@ -10,9 +10,11 @@ import { markUp } from '@shared/contracts/primitives';
 import { customer, type Quote } from '@shared/contracts/quotes';
 import { type ProblemError } from '../api-client/problem-error';
 import { Session } from '../session/session';
+import { DayPipe } from '../ui/date-pipes';
 import { fits, showAtFields } from '../ui/field-problems';
 import { Icon } from '../ui/icon';
 import { ProblemNote } from '../ui/problem-note';
+import { ReadableDaysPipe } from '../ui/readable-days-pipe';
 import { QuoteDesk } from './quote-desk';
 
 type Fields = 'name' | 'email' | 'address' | 'markUpPercent' | 'validUntil' | 'notes';
@@ -31,7 +33,8 @@ function valuesOf({ customer, markUpPercent, validUntil, notes }: Quote): Record
 /** The dealer's customer, mark-up, notes and validity of a quote: typed freely, saved on purpose. */
 @Component({
   selector: 'app-details-form',
-  imports: [ReactiveFormsModule, MatButton, MatFormFieldModule, MatInput, Icon, ProblemNote],
+  imports: [ReactiveFormsModule, MatButton, MatFormFieldModule, MatInput, Icon, ProblemNote, ReadableDaysPipe],
+  providers: [DayPipe],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './details-form.html',
   styles: `

@@ -18,6 +18,7 @@ import { showAtFields } from '../ui/field-problems';
 import { Icon } from '../ui/icon';
 import { MoneyPipe } from '../ui/money-pipe';
 import { ProblemNote } from '../ui/problem-note';
+import { ReadableDaysPipe } from '../ui/readable-days-pipe';
 import { TotalsTable } from '../ui/totals-table';
 import { OrderDesk } from './order-desk';
 import { QuoteDesk } from './quote-desk';
@@ -39,9 +40,10 @@ const reviewable = ['over-credit', 'account-on-hold', 'overdue'];
     Icon,
     MoneyPipe,
     ProblemNote,
+    ReadableDaysPipe,
     TotalsTable,
   ],
-  providers: [QuoteDesk, OrderDesk],
+  providers: [QuoteDesk, OrderDesk, DayPipe],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './place-order-page.html',
   styleUrl: './place-order-page.scss',

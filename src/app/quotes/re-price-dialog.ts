@@ -11,16 +11,28 @@ import { ApiClient } from '../api-client/api-client';
 import { loaded } from '../api-client/loaded';
 import { type ProblemError } from '../api-client/problem-error';
 import { Session } from '../session/session';
-import { InstantPipe } from '../ui/date-pipes';
+import { DayPipe, InstantPipe } from '../ui/date-pipes';
 import { showAtFields } from '../ui/field-problems';
 import { MoneyPipe } from '../ui/money-pipe';
 import { ProblemNote } from '../ui/problem-note';
+import { ReadableDaysPipe } from '../ui/readable-days-pipe';
 import { type QuoteDesk } from './quote-desk';
 
 /** What the quote would cost under the list in force now, line by line, and a button to take it. Closes with true. */
 @Component({
   selector: 'app-re-price-dialog',
-  imports: [MatDialogModule, MatButton, MatFormFieldModule, MatInput, ReactiveFormsModule, InstantPipe, MoneyPipe, ProblemNote],
+  imports: [
+    MatDialogModule,
+    MatButton,
+    MatFormFieldModule,
+    MatInput,
+    ReactiveFormsModule,
+    InstantPipe,
+    MoneyPipe,
+    ProblemNote,
+    ReadableDaysPipe,
+  ],
+  providers: [DayPipe],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './re-price-dialog.html',
   styles: `

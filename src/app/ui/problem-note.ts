@@ -1,11 +1,14 @@
 import { ChangeDetectionStrategy, Component, computed, input, output } from '@angular/core';
 import { MatButton } from '@angular/material/button';
 import { type ProblemError } from '../api-client/problem-error';
+import { DayPipe } from './date-pipes';
+import { ReadableDaysPipe } from './readable-days-pipe';
 
 /** What went wrong and what to do, read out at once. Offers to try again where that may help. */
 @Component({
   selector: 'app-problem-note',
-  imports: [MatButton],
+  imports: [MatButton, ReadableDaysPipe],
+  providers: [DayPipe],
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
     <div class="sy-problem" role="alert">
@@ -13,12 +16,12 @@ import { type ProblemError } from '../api-client/problem-error';
         @if (heading(); as words) {
           <b>{{ words }}</b>
         }
-        {{ problem().detail }}
+        {{ problem().detail | readableDays }}
       </p>
       @if (problem().errors.length > 0) {
         <ul>
           @for (error of problem().errors; track $index) {
-            <li>{{ error.detail }}</li>
+            <li>{{ error.detail | readableDays }}</li>
           }
         </ul>
       }
