@@ -58,13 +58,15 @@ function quote(id: string, tradeAccount: string, lines: number, state: Quote['st
 }
 
 const company = signal('ottery');
+const signedIn = signal(true);
 let quotes: CurrentQuotes;
 let http: HttpTestingController;
 
 describe('CurrentQuotes', () => {
   beforeEach(() => {
     company.set('ottery');
-    const session = { user: () => ({ company: { id: company() } }), may: () => true };
+    signedIn.set(true);
+    const session = { user: () => ({ company: { id: company() } }), may: () => signedIn() };
     TestBed.configureTestingModule({
       providers: [provideHttpClient(), provideHttpClientTesting(), CurrentQuotes, { provide: Session, useValue: session }],
     });
@@ -131,12 +133,27 @@ describe('CurrentQuotes', () => {
 
   it('takes up the open quotes of an address, and no others', () => {
     quotes.use(['a', 'b', 'c', '../x']);
+    TestBed.tick();
     expect(quotes.ids()).toEqual(['a', 'b', 'c']);
     http.expectOne('/api/quotes/a').flush(quote('a', 'at-northmere', 3));
     http.expectOne('/api/quotes/b').flush(quote('b', 'at-kestrel-ford', 1, 'ordered'));
     http.expectOne('/api/quotes/c').flush({}, { status: 404, statusText: 'Not Found' });
     expect(quotes.ids()).toEqual(['a']);
     expect(quotes.at('at-northmere')).toMatchObject({ lines: 3 });
+    expect(quotes.refused()).toBe(true);
+  });
+
+  it('keeps the quotes of an address until somebody is signed in', () => {
+    signedIn.set(false);
+    quotes.use(['a']);
+    TestBed.tick();
+    http.expectNone('/api/quotes/a');
+    expect(quotes.ids()).toEqual(['a']);
+    signedIn.set(true);
+    TestBed.tick();
+    http.expectOne('/api/quotes/a').flush(quote('a', 'at-northmere', 3));
+    expect(quotes.at('at-northmere')).toMatchObject({ id: 'a' });
+    expect(quotes.refused()).toBe(false);
   });
 
   it('shows nothing of one company to another', () => {

@@ -1,5 +1,5 @@
-import { computed, DestroyRef, inject, Injectable, signal } from '@angular/core';
-import { catchError, concatMap, finalize, forkJoin, map, type Observable, of, Subject, tap } from 'rxjs';
+import { computed, DestroyRef, effect, inject, Injectable, signal, untracked } from '@angular/core';
+import { catchError, concatMap, finalize, map, type Observable, of, Subject, tap } from 'rxjs';
 import { type LineInput } from '@shared/contracts/prices';
 import { addQuoteLines, createQuote, type Quote, readQuote } from '@shared/contracts/quotes';
 import { ApiClient } from '../api-client/api-client';
@@ -45,6 +45,9 @@ export class CurrentQuotes {
   private readonly open = signal<readonly CurrentQuote[]>([]);
   /** identities from the address that were not read yet */
   private readonly unread = signal<readonly string[]>([]);
+  private readonly reading = new Set<string>();
+  /** the address named a quote that takes no more lines, or is not one of ours */
+  readonly refused = signal(false);
 
   readonly adding = computed(() => this.waiting() > 0);
   readonly added = signal<AddedLine | null>(null);
@@ -56,6 +59,10 @@ export class CurrentQuotes {
 
   constructor() {
     this.jobs.pipe(concatMap((job) => this.work(job))).subscribe();
+    effect(() => {
+      if (!this.session.may('quotes.read')) return;
+      for (const id of this.unread()) if (!this.reading.has(id)) this.read(id);
+    });
     inject(DestroyRef).onDestroy(() => this.jobs.complete());
   }
 
@@ -76,16 +83,24 @@ export class CurrentQuotes {
     this.jobs.next({ line, tradeAccount });
   }
 
-  /** Takes up the quotes that an address names, unless they take no more lines. */
+  /** Takes up the quotes that an address names, once somebody is signed in who may read them. */
   use(ids: readonly string[]): void {
     const wanted = ids.filter((id) => /^[\w.~-]{1,64}$/.test(id)).slice(0, 10);
-    const missing = wanted.filter((id) => !this.ids().includes(id));
-    if (missing.length === 0 || !this.session.may('quotes.read')) return;
-    this.unread.update((before) => [...before, ...missing]);
-    forkJoin(missing.map((id) => this.api.call(readQuote, { params: { id } }).pipe(catchError(() => of(null))))).subscribe((quotes) => {
-      this.unread.update((before) => before.filter((id) => !missing.includes(id)));
-      for (const quote of quotes) if (quote?.state === 'open') this.remember(quote);
-    });
+    const missing = wanted.filter((id) => !untracked(this.ids).includes(id));
+    if (missing.length > 0) this.unread.update((before) => [...before, ...missing]);
+  }
+
+  private read(id: string): void {
+    this.reading.add(id);
+    this.api
+      .call(readQuote, { params: { id } })
+      .pipe(catchError(() => of(null)))
+      .subscribe((quote) => {
+        this.reading.delete(id);
+        this.unread.update((before) => before.filter((other) => other !== id));
+        if (quote?.state === 'open') this.remember(quote);
+        else this.refused.set(true);
+      });
   }
 
   private work({ line, tradeAccount }: Job): Observable<unknown> {

@@ -1,4 +1,4 @@
-import { ChangeDetectionStrategy, Component, effect, inject, untracked, viewChild } from '@angular/core';
+import { ChangeDetectionStrategy, Component, computed, effect, inject, untracked, viewChild } from '@angular/core';
 import { otherMeasure } from '@shared/measures/format-length';
 import { Asker } from '../ui/asker';
 import { AddBar } from './add-bar';
@@ -36,6 +36,10 @@ export class Workbench {
   private readonly sizes = viewChild.required(SizeForm);
   private readonly addBar = viewChild<AddBar>('addBar');
 
+  protected readonly ignored = computed(() =>
+    [...this.draft.ignored(), ...(this.quotes.refused() ? ['a quote that takes no more lines, or is not yours'] : [])].join('; '),
+  );
+
   constructor() {
     inject(BenchAddress);
     // The tag was for the line that is in the quote now; one typed meanwhile is for the next.
@@ -45,6 +49,11 @@ export class Workbench {
         if (added && this.draft.draft().tag.trim() === added.line.tag) this.draft.type({ tag: '' });
       });
     });
+  }
+
+  protected understood(): void {
+    this.draft.ignored.set([]);
+    this.quotes.refused.set(false);
   }
 
   protected add(): void {
