@@ -63,6 +63,8 @@ export class OrderPage {
     const order = this.order();
     return order !== undefined && isLate(order, dayIn(this.timeZone, Date.now()));
   });
+  /** Clerks look at the account before they release an order. */
+  protected readonly seesAccount = !this.isDealer && this.session.may('trade-accounts.movements');
   /** Where this reader finds invoices. */
   protected readonly invoices = this.isDealer ? '/money/invoices' : '/receivables/invoices';
 
@@ -113,7 +115,7 @@ export class OrderPage {
 
   private consequence(to: OrderState, { dealer, fabricator, units }: Order): string {
     const reader = this.isDealer ? fabricator.name : dealer.name;
-    const what = `${units} ${units === 1 ? 'unit' : 'units'} will not be made, and the credit they bind is free at once.`;
+    const what = `${units} ${units === 1 ? 'unit' : 'units'} will not be made, and any credit they bind is free at once.`;
     return ends.includes(to)
       ? `${what} This cannot be taken back. ${reader} reads your reason.`
       : `${reader} reads your reason in the order’s history.`;

@@ -39,19 +39,8 @@ type Row = FormGroup<{ packed: FormControl<boolean>; quantity: FormControl<strin
 /** One order at the plant: what of it is packed, and its dispatch. */
 @Component({
   selector: 'app-dispatch-page',
-  imports: [
-    ReactiveFormsModule,
-    MatButton,
-    MatCheckbox,
-    RouterLink,
-    DayPipe,
-    InstantPipe,
-    Icon,
-    ProblemNote,
-    SizePipe,
-    StateMark,
-    UnitThumb,
-  ],
+  imports: [ReactiveFormsModule, MatButton, MatCheckbox, RouterLink, InstantPipe, Icon, ProblemNote, SizePipe, StateMark, UnitThumb],
+  providers: [DayPipe],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './dispatch-page.html',
   styleUrl: './dispatch-page.scss',
@@ -62,6 +51,7 @@ export class DispatchPage implements HoldsWork {
   private readonly asker = inject(Asker);
   private readonly announcer = inject(LiveAnnouncer);
   private readonly title = inject(Title);
+  private readonly days = inject(DayPipe);
   private readonly injector = inject(Injector);
   private readonly host = inject<ElementRef<HTMLElement>>(ElementRef);
 
@@ -105,6 +95,11 @@ export class DispatchPage implements HoldsWork {
 
   unsaved(): string | null {
     return this.packed() > 0 && !this.flight.flying() ? `${this.packed()} units ticked as packed for order ${this.order()?.number}` : null;
+  }
+
+  protected when({ promisedOn, requiredOn }: Order): string {
+    const promised = promisedOn ? `promised ${this.days.transform(promisedOn)}` : 'promised for no day yet';
+    return requiredOn ? `${promised}, needed by ${this.days.transform(requiredOn)}` : promised;
   }
 
   protected rowOf({ id }: OrderLine): Row | undefined {

@@ -115,6 +115,11 @@ export class RePriceDialog {
     if (problem?.code === 'price-changed') this.preview.reload();
   }
 
+  /** A rise is written with its sign too. */
+  protected sign(change: Money | null): string {
+    return change && !change.amount.startsWith('-') ? '+' : '';
+  }
+
   private firstDay(): string {
     const held = this.desk.quote()?.validUntil ?? '';
     const usual = addDays(this.today, 30);
