@@ -75,12 +75,13 @@ describe('quotes', () => {
   });
 
   it('marks up each unit, rounded half up, and the lines from it', async () => {
-    const quote = await make({ markUpPercent: '35' });
+    // 184.23 × 1.125 = 207.25875; marking up the line of 1105.38 instead would make 1243.55.
+    const quote = await make({ markUpPercent: '12.5' });
     expect(quote.lines[0]!.retail).toEqual({
-      unitPrice: { amount: '248.71', currency: 'USD' },
-      linePrice: { amount: '1492.26', currency: 'USD' },
+      unitPrice: { amount: '207.26', currency: 'USD' },
+      linePrice: { amount: '1243.56', currency: 'USD' },
     });
-    expect(quote.retailGoods.amount).toBe('1492.26');
+    expect(quote.retailGoods.amount).toBe('1243.56');
     expect(quote.goods.amount).toBe('1105.38');
   });
 
