@@ -48,7 +48,9 @@ export async function dispatch(page: Page, orderNumber: string, what: { tag: str
       await line.getByRole('textbox').fill(units);
     }
   }
-  await page.getByRole('button', { name: /^Dispatch \d+ units?$/ }).click();
+  const go = /^Dispatch \d+ units?$/;
+  await page.getByRole('button', { name: go }).click();
+  await page.getByRole('dialog').getByRole('button', { name: go }).click();
   await page.getByText(/^Dispatched as/).waitFor();
 }
 

@@ -27,7 +27,7 @@ afterAll(async () => {
 describe.each([
   { where: 'at a desk', viewport: DESK, po: 'Desk 4471' },
   { where: 'on a phone', viewport: PHONE, po: 'Phone 4472' },
-])('the main job, $where', ({ viewport, po }) => {
+])('the main job, $where', ({ where, viewport, po }) => {
   const sittings: Sitting[] = [];
   let buyer: Sitting;
   let before: CreditShown;
@@ -47,10 +47,19 @@ describe.each([
     it(name, async () => {
       if (torn) throw new Error('an earlier chapter failed');
       torn = true;
-      await happens();
-      torn = false;
+      try {
+        await happens();
+        torn = false;
+      } finally {
+        if (torn) await photograph(`${where}: ${name}`);
+      }
     });
 
+  const photograph = async (what: string) => {
+    for (const [i, { page }] of sittings.entries()) {
+      await page.screenshot({ path: `test-results/${what.replace(/\W+/g, '-')}-${i}.png`, fullPage: true }).catch(() => undefined);
+    }
+  };
   afterAll(() => Promise.all(sittings.map((sitting) => sitting.close())));
 
   chapter('a visitor reads how a unit is made and tries the Bench', async () => {
