@@ -8,9 +8,9 @@ export interface Bar {
   chosen: boolean;
 }
 
-const sheet = { width: 600, text: 14, row: 34 };
-const left = 170;
-const right = 520;
+const sheet = { width: 440, text: 14, row: 34 };
+const left = 134;
+const right = 370;
 
 /** Values as level bars from zero, in the order given. */
 export function drawBars(title: string, bars: readonly Bar[]): Drawing {

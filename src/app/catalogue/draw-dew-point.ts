@@ -2,8 +2,8 @@ import { type Drawing, type Item, round } from '@shared/drawings/drawing';
 import { dewPoint } from '@shared/glazing/condensation';
 import { decimals, percentText } from './facts';
 
-const sheet = { width: 600, height: 300, text: 13 };
-const frame = { left: 52, right: 580, top: 34, bottom: 262 };
+const sheet = { width: 440, height: 280, text: 13 };
+const frame = { left: 52, right: 424, top: 34, bottom: 242 };
 const most = 0.6;
 const [coldest, warmest] = [-40, 15];
 

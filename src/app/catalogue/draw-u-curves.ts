@@ -9,8 +9,8 @@ export interface UCurve {
   chosen: boolean;
 }
 
-const sheet = { width: 600, height: 300, text: 13 };
-const frame = { left: 44, right: 512, top: 34, bottom: 262 };
+const sheet = { width: 440, height: 280, text: 13 };
+const frame = { left: 44, right: 366, top: 34, bottom: 242 };
 
 /** U-values against cavity width, one line for each fill, its lowest point marked. */
 export function drawUCurves(curves: readonly UCurve[]): Drawing {

@@ -27,7 +27,7 @@ export class FrontPage {
     const unit = comparingUnit(catalogue);
     const { thermal, solar, geometry, weight } = evaluateResolved(resolved(unit, catalogue), { ...catalogue, fabricators: [] });
     return {
-      drawing: section(unit, catalogue, { system: 'metric', sheet: { width: 400, height: 400, textSize: 15 } }),
+      drawing: section(unit, catalogue, { system: 'metric', sheet: { width: 400, height: 318, textSize: 15 } }),
       words: makeUpText(unit, catalogue),
       make: benchMake(unit),
       size: `${unit.width}x${unit.height}mm`,

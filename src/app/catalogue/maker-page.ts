@@ -1,8 +1,8 @@
 import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
 import { RouterLink } from '@angular/router';
 import { type Catalogue } from '@shared/contracts/catalogue';
-import { formatLengthBoth } from '@shared/measures/format-length';
-import { formatAltitude, formatWeight } from '@shared/measures/format-quantity';
+import { formatLengthBoth, otherMeasure } from '@shared/measures/format-length';
+import { formatAltitude, formatArea, formatWeight } from '@shared/measures/format-quantity';
 import { Drawing } from '../ui/drawing/drawing';
 import { CatalogueFrame } from './catalogue-frame';
 import { drawSizeChart, type SizeRegion } from './draw-size-chart';
@@ -52,11 +52,14 @@ function limitFacts({ capabilities: { unit, lites, capillary }, measureSystem, p
     { label: 'Smallest', value: sizeWords(unit.minWidth, unit.minHeight, measureSystem) },
     { label: 'Long edge up to', value: both(unit.maxLong) },
     { label: 'Short edge up to', value: both(unit.maxShort) },
-    { label: 'Area up to', value: String(unit.maxAreaM2), unit: 'm²' },
+    {
+      label: 'Area up to',
+      value: `${formatArea(unit.maxAreaM2, measureSystem)} (${formatArea(unit.maxAreaM2, otherMeasure(measureSystem))})`,
+    },
     { label: 'Long edge against the short, up to', value: `${unit.maxAspect} ×` },
     {
       label: 'Weight up to',
-      value: `${formatWeight(unit.maxWeightKg, measureSystem)} (${formatWeight(unit.maxWeightKg, measureSystem === 'imperial' ? 'metric' : 'imperial')})`,
+      value: `${formatWeight(unit.maxWeightKg, measureSystem)} (${formatWeight(unit.maxWeightKg, otherMeasure(measureSystem))})`,
     },
     { label: 'Overall thickness up to', value: both(unit.maxOverall) },
     { label: 'Lites in a unit, up to', value: String(lites.max) },
@@ -112,9 +115,17 @@ function thicknessCharts({ capabilities, measureSystem }: Maker, { glasses, trea
     });
 }
 
-function offersOf({ capabilities }: Maker, catalogue: Catalogue) {
+/** What a maker offers of one part: a line for each item with its limits, or names alone. */
+interface Offer {
+  name: string;
+  path: string;
+  lines: { name: string; words: string }[];
+  plain?: string;
+}
+
+function offersOf({ capabilities }: Maker, catalogue: Catalogue): Offer[] {
   const named = (items: readonly { id: string; name: string }[], id: string) => items.find((item) => item.id === id)?.name ?? id;
-  return [
+  const offers: Offer[] = [
     {
       name: 'Treatments',
       path: '/catalogue/treatments',
@@ -155,12 +166,18 @@ function offersOf({ capabilities }: Maker, catalogue: Catalogue) {
     {
       name: 'Shapes',
       path: '/catalogue/shapes',
-      lines: catalogue.shapes.filter((shape) => capabilities.shapes.includes(shape.class)).map(({ name }) => ({ name, words: '' })),
+      lines: [],
+      plain: catalogue.shapes
+        .filter((shape) => capabilities.shapes.includes(shape.class))
+        .map(({ name }) => name)
+        .join(', '),
     },
     {
       name: 'Edge work',
       path: '/catalogue/edge-work',
-      lines: capabilities.edgeWork.map((id) => ({ name: named(catalogue.edgeWork, id), words: '' })),
+      lines: [],
+      plain: capabilities.edgeWork.map((id) => named(catalogue.edgeWork, id)).join(', '),
     },
-  ].filter(({ lines }) => lines.length > 0);
+  ];
+  return offers.filter(({ lines, plain }) => lines.length > 0 || plain);
 }

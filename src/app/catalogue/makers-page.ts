@@ -1,6 +1,7 @@
 import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
 import { RouterLink } from '@angular/router';
 import { type Catalogue } from '@shared/contracts/catalogue';
+import { formatArea } from '@shared/measures/format-quantity';
 import { Drawing } from '../ui/drawing/drawing';
 import { CatalogueFrame } from './catalogue-frame';
 import { drawSizeChart } from './draw-size-chart';
@@ -28,7 +29,7 @@ import { unitLimits } from './size-area';
             </h2>
             <p class="sy-soft">{{ maker.town }}</p>
             <p>{{ maker.about }}</p>
-            <p>Up to {{ maker.largest }}, {{ maker.area }} m²; {{ maker.lites }}. Tempers glass {{ maker.tempers }}.</p>
+            <p>Up to {{ maker.largest }}, {{ maker.area }}; {{ maker.lites }}. Tempers glass {{ maker.tempers }}.</p>
           </div>
         </article>
       } @empty {
@@ -79,8 +80,8 @@ export class MakersPage {
         town,
         about,
         largest: sizeWords(unit.maxLong, unit.maxShort, measureSystem),
-        area: unit.maxAreaM2,
-        lites: lites.max > 2 ? `double and triple units` : 'double units',
+        area: formatArea(unit.maxAreaM2, measureSystem),
+        lites: lites.max > 2 ? 'double and triple units' : 'double units',
         tempers: Number.isFinite(least) ? `from ${least} mm up` : 'elsewhere',
         chart: drawSizeChart([{ name, limits: unitLimits(capabilities), look: 'filled' }], {
           system: measureSystem,

@@ -1,6 +1,7 @@
 import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
 import { RouterLink } from '@angular/router';
 import { type Catalogue } from '@shared/contracts/catalogue';
+import { section } from '@shared/drawings/section';
 import { standardPressure } from '@shared/glazing/climate-load';
 import { dewPoint, saturationPressure } from '@shared/glazing/condensation';
 import { makingPictures } from '@shared/drawings/making-pictures';
@@ -28,6 +29,7 @@ export class MakingPage {
   readonly catalogue = input.required<Catalogue>();
 
   protected readonly trail = [{ name: 'Catalogue', path: '/catalogue' }];
+  protected readonly whole = computed(() => section(comparingUnit(this.catalogue()), this.catalogue(), { system: 'metric' }));
   private readonly pictures = makingPictures();
   protected readonly steps = makingSteps.map((step) => ({ ...step, drawing: this.pictures[step.picture] }));
 

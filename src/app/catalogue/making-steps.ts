@@ -23,7 +23,7 @@ export const makingSteps: readonly MakingStep[] = [
     text: [
       'Where the seal will sit, a soft coat is ground away in a narrow band. Butyl must hold on bare glass; on silver it would hold for a while, and the silver would tarnish from the edge inward.',
     ],
-    practice: 'How wide the band is depends on spacer and seals; the maker sets it.',
+    practice: 'how wide the band is depends on spacer and seals; the maker sets it.',
   },
   {
     picture: 'washed',
@@ -39,7 +39,7 @@ export const makingSteps: readonly MakingStep[] = [
       'A hollow bar is bent or cut to the size of the unit, less the sightline, and filled with beads of molecular sieve, the desiccant. Small holes on its inner face let the beads dry the air in the cavity.',
       'The pores of the sieve are so fine that water vapour enters and the gas does not.',
     ],
-    practice: 'That sieve with pores of 3 ångström takes up water and leaves argon alone.',
+    practice: 'sieve with pores of 3 ångström takes up water and leaves argon alone.',
   },
   {
     picture: 'primary seal',
@@ -54,7 +54,7 @@ export const makingSteps: readonly MakingStep[] = [
     text: [
       'Spacer and second lite are set down and pressed, so that the butyl is flat and unbroken all round. Where a gas was ordered, it takes the place of the air.',
     ],
-    practice: 'That about nine tenths of the air is replaced.',
+    practice: 'about nine tenths of the air are replaced.',
   },
   {
     picture: 'secondary seal',

@@ -15,18 +15,20 @@ import { questionsOf } from './questions';
       <p class="lead">Asked by those who buy, fit or look through sealed units; answered as far as one honestly can.</p>
       <div class="list">
         @for (each of questions(); track each.id) {
-          <details [id]="each.id">
+          <details>
             <summary>
               <h2>{{ each.question }}</h2>
             </summary>
-            @for (words of each.answer; track $index) {
-              <p>{{ words }}</p>
-            }
-            @if (each.more; as more) {
-              <p>
-                <a [routerLink]="more.path">{{ more.text }}</a>
-              </p>
-            }
+            <div [id]="each.id">
+              @for (words of each.answer; track $index) {
+                <p>{{ words }}</p>
+              }
+              @if (each.more; as more) {
+                <p>
+                  <a [routerLink]="more.path">{{ more.text }}</a>
+                </p>
+              }
+            </div>
           </details>
         }
       </div>
@@ -70,8 +72,8 @@ import { questionsOf } from './questions';
     details p {
       margin-left: 28px;
     }
-    details p:last-child {
-      padding-bottom: 20px;
+    details > div {
+      padding-bottom: 12px;
     }
   `,
 })

@@ -40,7 +40,7 @@ export function questionsOf(catalogue: Catalogue): Question[] {
       id: 'fog-on-the-outside',
       question: 'In the morning there is dew on the outside. Is the unit faulty?',
       answer: [
-        'No. It insulates so well that the outer lite gets no warmth from the room; on a clear night it cools below the dew point of the air outside. The dew goes with the first sun. A wetted outside shows that the unit works.',
+        'No. It insulates so well that the outer lite gets no warmth from the room; on a clear night it cools below the dew point of the air outside. The dew goes with the first sun.',
       ],
     },
     {

@@ -12,7 +12,7 @@ export const edgeWorkView: PartView<EdgeWorkItem> = {
     'A cut edge is sharp and full of tiny cracks, and glass nearly always breaks from its edge. Taking off the arris is safer for hands and better for the glass.',
     'Inside a frame nobody sees the edge. Finer work is for edges that stay in sight, or that take load or heat.',
   ],
-  practice: 'That a lite is at least seamed before it is tempered.',
+  practice: 'a lite is at least seamed before it is tempered.',
   facts: () => [],
   source: () => null,
   offer: (work) => (maker) => (maker.capabilities.edgeWork.includes(work.id) ? 'done' : null),

@@ -15,7 +15,7 @@ export const gasView: PartView<GasItem> = {
     'A fill is worth most beside a low-e coating. Without one, radiation carries most of the heat and the gas can change little.',
     'An open capillary tube and a gas fill exclude each other: the gas would leave the way the air comes in. Where a unit must breathe on its way over high ground, it is filled with air.',
   ],
-  practice: 'That a fill is 90 % of the named gas when new, and loses a little of it every year.',
+  practice: 'a fill is 90 % of the named gas when new, and loses a little of it every year.',
   facts: ({ gas, fill }) => {
     const { density, viscosity, conductivity } = mixWithAir(gas, fill);
     return [
