@@ -112,10 +112,14 @@ it('steps a size by the arrows, and opens and leaves the list of keys', async ()
   const width = page.getByRole('textbox', { name: 'Width', exact: true });
   await width.focus();
   await typeOver(page, '24');
+  const becomes = async (text: string) =>
+    page.waitForFunction(([field, value]) => (field as HTMLInputElement).value === value, [await width.elementHandle(), text] as const);
   await page.keyboard.press('ArrowUp');
-  expect(await width.inputValue()).toBe('24 1/16');
+  await becomes('24 1/16');
+  await page.keyboard.press('ArrowDown');
+  await becomes('24');
   await page.keyboard.press('Shift+ArrowDown');
-  expect(await width.inputValue()).toBe('23 1/16');
+  await becomes('23');
 
   const keys = page.getByRole('button', { name: /^Keys/ });
   await tabTo(page, keys);

@@ -78,7 +78,7 @@ const openLine = async (page: Page) => {
 
 const example = '/bench?size=36.5x48.25in&units=6&make=clear-3:tempered,16:argon:stainless,clear-3:tempered:low-e-soft@3';
 const triple =
-  '/bench?size=927x1226mm&make=clear-4:tempered:low-e-soft@2,14:krypton:warm-edge,clear-4,14:krypton:warm-edge,clear-4:tempered:low-e-soft@5&place=door:yes,bottom:200mm,top:2000mm';
+  '/bench?size=927x1226mm&make=clear-4:tempered:low-e-soft@2,14:krypton:warm-edge,clear-4:annealed,14:krypton:warm-edge,clear-4:tempered:low-e-soft@5&place=door:yes,bottom:200mm,top:2000mm';
 
 const publicScreens = shownTo(everyone, [
   { name: 'front', path: '/', heading: /Sealed units, made to size/, hasNone: true },
