@@ -10,6 +10,9 @@ import { rowCounts } from '../factories/row-counts';
 const DAY_MS = 86_400_000;
 const line = (overrides = {}) => ({ unit: unitFactory(), quantity: 6, tag: 'W1', ...overrides });
 
+// A market is made for each test, which takes its time on a busy machine.
+jest.setTimeout(30_000);
+
 describe('prices that a quote holds', () => {
   let market: Market;
   let buyer: Caller;

@@ -8,6 +8,9 @@ import { rowCounts } from '../factories/row-counts';
 const line = (overrides = {}) => ({ unit: unitFactory(), quantity: 6, tag: 'W1', ...overrides });
 const key = (text: string) => ({ 'idempotency-key': `key-${text}` });
 
+// A market is made for each test, and 500 lines take their time on a busy machine.
+jest.setTimeout(30_000);
+
 describe('quotes', () => {
   let market: Market;
   let buyer: Caller;
