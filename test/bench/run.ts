@@ -10,6 +10,7 @@ import { type Measure } from './measure';
 const parts: Record<string, () => Promise<Measure[]>> = {
   pricing: async () => (await import('./pricing-bench')).measurePricing(),
   orders: async () => (await import('./orders-bench')).measureOrders(),
+  pages: async () => (await import('./pages-bench')).measurePages(),
   browser: async () => (await import('./browser-bench')).measureBrowser(),
 };
 
