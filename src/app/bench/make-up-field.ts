@@ -1,7 +1,7 @@
-import { ChangeDetectionStrategy, Component, computed, DestroyRef, effect, inject, signal } from '@angular/core';
-import { FormControl, ReactiveFormsModule } from '@angular/forms';
+import { ChangeDetectionStrategy, Component, computed, DestroyRef, inject, signal } from '@angular/core';
 import { MatFormFieldModule } from '@angular/material/form-field';
 import { MatInput } from '@angular/material/input';
+import { WrongField } from '../ui/wrong-field';
 import { UnitDraft } from './unit-draft';
 
 /** A pause after which unfinished text is taken for a mistake, ms. */
@@ -10,12 +10,13 @@ const PAUSE = 900;
 /** The make-up as the trade writes it. A long one runs over two lines; Enter settles it. */
 @Component({
   selector: 'app-make-up-field',
-  imports: [ReactiveFormsModule, MatFormFieldModule, MatInput],
+  imports: [MatFormFieldModule, MatInput, WrongField],
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
     <mat-form-field appearance="fill" floatLabel="always" subscriptSizing="dynamic">
       <mat-label>As you would write it</mat-label>
       <textarea
+        #field
         matInput
         rows="1"
         autocomplete="off"
@@ -23,9 +24,9 @@ const PAUSE = 900;
         spellcheck="false"
         maxlength="300"
         enterkeyhint="done"
-        [formControl]="control"
-        [errorStateMatcher]="matcher"
-        (input)="type()"
+        [value]="draft.makeUp()"
+        [appWrongField]="shown() !== null"
+        (input)="type(field.value)"
         (blur)="settle()"
         (keydown.enter)="$event.preventDefault(); settle()"
       ></textarea>
@@ -44,26 +45,20 @@ const PAUSE = 900;
   `,
 })
 export class MakeUpField {
-  private readonly draft = inject(UnitDraft);
+  protected readonly draft = inject(UnitDraft);
   private readonly settled = signal(true);
   private pause: ReturnType<typeof setTimeout> | undefined;
   protected readonly shown = computed(() => (this.settled() ? this.draft.problemAt('/makeUp') : null));
-  protected readonly control = new FormControl('', { nonNullable: true });
-  protected readonly matcher = { isErrorState: () => this.shown() !== null };
 
   constructor() {
-    effect(() => {
-      const text = this.draft.makeUp();
-      if (this.control.value !== text) this.control.setValue(text);
-    });
     inject(DestroyRef).onDestroy(() => clearTimeout(this.pause));
   }
 
-  protected type(): void {
+  protected type(text: string): void {
     this.settled.set(false);
     clearTimeout(this.pause);
     this.pause = setTimeout(() => this.settled.set(true), PAUSE);
-    this.draft.typeMakeUp(this.control.value);
+    this.draft.typeMakeUp(text);
   }
 
   /** Written out as usual, where it can be read. */

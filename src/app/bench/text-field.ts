@@ -3,7 +3,6 @@ import {
   Component,
   computed,
   DestroyRef,
-  effect,
   type ElementRef,
   inject,
   input,
@@ -11,9 +10,9 @@ import {
   signal,
   viewChild,
 } from '@angular/core';
-import { FormControl, ReactiveFormsModule } from '@angular/forms';
 import { MatFormFieldModule } from '@angular/material/form-field';
 import { MatInput } from '@angular/material/input';
+import { WrongField } from '../ui/wrong-field';
 
 /** A pause after which unfinished text is taken for a mistake, ms. */
 const PAUSE = 900;
@@ -21,7 +20,7 @@ const PAUSE = 900;
 /** A line of text, kept as it is typed, with the message about it below once one pauses or leaves. */
 @Component({
   selector: 'app-text-field',
-  imports: [ReactiveFormsModule, MatFormFieldModule, MatInput],
+  imports: [MatFormFieldModule, MatInput, WrongField],
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
     <mat-form-field appearance="fill" floatLabel="always" subscriptSizing="dynamic">
@@ -32,12 +31,12 @@ const PAUSE = 900;
         type="text"
         autocomplete="off"
         spellcheck="false"
-        [maxlength]="longest()"
-        [formControl]="control"
-        [errorStateMatcher]="matcher"
+        [attr.maxlength]="longest()"
+        [value]="text()"
+        [appWrongField]="shown() !== null"
         [attr.inputmode]="keys()"
         [attr.enterkeyhint]="enterKeyHint()"
-        (input)="type()"
+        (input)="type(field.value)"
         (blur)="settled.set(true)"
         (keydown.enter)="enter($event)"
       />
@@ -63,17 +62,11 @@ export class TextField {
   readonly entered = output();
 
   private readonly field = viewChild.required<ElementRef<HTMLInputElement>>('field');
-  protected readonly control = new FormControl('', { nonNullable: true });
   protected readonly settled = signal(true);
   private pause: ReturnType<typeof setTimeout> | undefined;
   protected readonly shown = computed(() => (this.settled() ? this.problem() : null));
-  protected readonly matcher = { isErrorState: () => this.shown() !== null };
 
   constructor() {
-    effect(() => {
-      const text = this.text();
-      if (this.control.value !== text) this.control.setValue(text);
-    });
     inject(DestroyRef).onDestroy(() => clearTimeout(this.pause));
   }
 
@@ -82,11 +75,11 @@ export class TextField {
     this.field().nativeElement.select();
   }
 
-  protected type(): void {
+  protected type(text: string): void {
     this.settled.set(false);
     clearTimeout(this.pause);
     this.pause = setTimeout(() => this.settled.set(true), PAUSE);
-    this.typed.emit(this.control.value);
+    this.typed.emit(text);
   }
 
   protected enter(event: Event): void {

@@ -3,7 +3,6 @@ import {
   Component,
   computed,
   DestroyRef,
-  effect,
   type ElementRef,
   inject,
   input,
@@ -12,11 +11,11 @@ import {
   signal,
   viewChild,
 } from '@angular/core';
-import { FormControl, ReactiveFormsModule } from '@angular/forms';
 import { MatFormFieldModule } from '@angular/material/form-field';
 import { MatInput } from '@angular/material/input';
 import { type MeasureSystem } from '@shared/measures/parse-length';
 import { besideLength, readLength, stepLength } from './read-length';
+import { WrongField } from './wrong-field';
 
 /** A pause after which unfinished text is taken for a mistake, ms. */
 const PAUSE = 900;
@@ -30,7 +29,7 @@ let count = 0;
  */
 @Component({
   selector: 'app-length-field',
-  imports: [ReactiveFormsModule, MatFormFieldModule, MatInput],
+  imports: [MatFormFieldModule, MatInput, WrongField],
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
     <mat-form-field appearance="fill" floatLabel="always" subscriptSizing="dynamic">
@@ -43,11 +42,11 @@ let count = 0;
         autocapitalize="off"
         spellcheck="false"
         maxlength="60"
-        [formControl]="control"
-        [errorStateMatcher]="matcher"
+        [value]="text()"
+        [appWrongField]="shown() !== null"
         [attr.enterkeyhint]="enterKeyHint()"
         [aria-describedby]="besideId"
-        (input)="typed()"
+        (input)="typed(field.value)"
         (blur)="settled.set(true)"
         (keydown.enter)="enter($event)"
         (keydown.arrowup)="step($event, 1)"
@@ -98,14 +97,8 @@ export class LengthField {
     const read = this.read();
     return 'mm' in read && read.mm !== null ? besideLength(this.text(), read.mm, this.system()) : null;
   });
-  protected readonly control = new FormControl('', { nonNullable: true });
-  protected readonly matcher = { isErrorState: () => this.shown() !== null };
 
   constructor() {
-    effect(() => {
-      const text = this.text();
-      if (this.control.value !== text) this.control.setValue(text);
-    });
     inject(DestroyRef).onDestroy(() => clearTimeout(this.pause));
   }
 
@@ -114,11 +107,11 @@ export class LengthField {
     this.field().nativeElement.select();
   }
 
-  protected typed(): void {
+  protected typed(text: string): void {
     this.settled.set(false);
     clearTimeout(this.pause);
     this.pause = setTimeout(() => this.settled.set(true), PAUSE);
-    this.text.set(this.control.value);
+    this.text.set(text);
   }
 
   protected enter(event: Event): void {
